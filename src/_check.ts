@@ -10,17 +10,29 @@ export function checkNumber(
   functionName: string,
 ): asserts value is number {
   if (typeof value === "number" && value >= low && value <= high) return;
-  refuse(value, `${low} to ${high}${unit && ` ${unit}`}`, slip(value, unit, low, high), argument, functionName);
+  const shown = unit === "fraction" ? ", as a fraction" : unit && ` ${unit}`;
+  refuse(value, `${low} to ${high}${shown}`, slip(value, unit, low, high), argument, functionName);
 }
 
 /** Throws unless `value` is an object (a record of named inputs). */
-export function checkRecord(value: unknown, argument: string, functionName: string): asserts value is object {
+export function checkRecord(
+  value: unknown,
+  argument: string,
+  functionName: string,
+): asserts value is object {
   if (typeof value === "object" && value !== null) return;
-  throw new TypeError(`${functionName}: ${argument} must be a record of named values, got ${show(value)}`);
+  throw new TypeError(
+    `${functionName}: ${argument} must be a record of named values, got ${show(value)}`,
+  );
 }
 
 /** Throws unless `field`, a number every record made by `maker` carries, is a number: catches raw input given for a prepared record. */
-export function checkPrepared(field: unknown, maker: string, argument: string, functionName: string): void {
+export function checkPrepared(
+  field: unknown,
+  maker: string,
+  argument: string,
+  functionName: string,
+): void {
   if (typeof field === "number") return;
   throw new TypeError(`${functionName}: ${argument} must be made by ${maker}(...)`);
 }
@@ -33,14 +45,24 @@ export function checkList(
   functionName: string,
 ): asserts value is ArrayLike<number> {
   if (!Array.isArray(value) && !(value instanceof Float64Array)) {
-    throw new TypeError(`${functionName}: ${argument} must be an array or a Float64Array, got ${show(value)}`);
+    throw new TypeError(
+      `${functionName}: ${argument} must be an array or a Float64Array, got ${show(value)}`,
+    );
   }
   if (value.length >= least) return;
-  throw new RangeError(`${functionName}: ${argument} needs at least ${least} values, got ${value.length}`);
+  throw new RangeError(
+    `${functionName}: ${argument} needs at least ${least} values, got ${value.length}`,
+  );
 }
 
 /** Throws the error for a value outside `range` (a text with its unit); `hint` names a likely slip. */
-export function refuse(value: unknown, range: string, hint: string, argument: string, functionName: string): never {
+export function refuse(
+  value: unknown,
+  range: string,
+  hint: string,
+  argument: string,
+  functionName: string,
+): never {
   const text = `${functionName}: ${argument} must be ${range}, got ${show(value)}${hint && ` (${hint})`}`;
   throw typeof value === "number" ? new RangeError(text) : new TypeError(text);
 }

@@ -17,29 +17,31 @@ const SMALL_SCALE = 2.938735877055719e-39;
  * below 2.3e-308 the result loses digits as subnormal numbers do. Above 709.78 it is Infinity, below -745.13 it is 0.
  */
 export function exp(x: number): number {
-  if (!(x > -700 && x < 700)) return expFar(x);
+  return x > -700 && x < 700 ? expNear(x, 0) : expFar(x);
+}
+
+/** e^x times 2^(32 shift). */
+function expNear(x: number, shift: number): number {
   const rounded = x * STEPS_PER_UNIT + ROUNDER - ROUNDER;
   const k = rounded | 0;
   const r = x - rounded * STEP_HIGH - rounded * STEP_LOW;
   const power = FRACTIONS[k & 127]!;
   const r2 = r * r;
   // Estrin form of r + r²/2 + r³/6 + r⁴/24 + r⁵/120
-  const tail = r + r2 * (0.5 + r * 0.16666666666666666 + r2 * (0.041666666666666664 + r * 0.008333333333333333));
-  return (power + power * tail) * (FINE[(k >> 7) & 31]! * COARSE[(k >> 12) + 32]!);
+  const tail =
+    r +
+    r2 * (0.5 + r * 0.16666666666666666 + r2 * (0.041666666666666664 + r * 0.008333333333333333));
+  return (power + power * tail) * (FINE[(k >> 7) & 31]! * COARSE[(k >> 12) + 32 + shift]!);
 }
 
 /** The exponential beyond ±700, where the power of two alone would over- or underflow, and for NaN. */
 function expFar(x: number): number {
-  if (x >= 709.782712893384) return Number.POSITIVE_INFINITY;
-  if (x <= -745.1332191019412) return 0;
-  if (x >= 700) return exp(x - 128 * LN2_HIGH - 128 * LN2_LOW) / SMALL_SCALE;
-  if (x <= -700) return exp(x + 128 * LN2_HIGH + 128 * LN2_LOW) * SMALL_SCALE;
+  if (x > 709.782712893384) return Number.POSITIVE_INFINITY;
+  if (x < -745.1332191019412) return 0;
+  if (x >= 700) return expNear(x, -4) / SMALL_SCALE;
+  if (x <= -700) return expNear(x, 4) * SMALL_SCALE;
   return x;
 }
-
-/** ln 2 in two parts, the first short enough that 128 times it is exact. */
-const LN2_HIGH = 0.6931469440460205;
-const LN2_LOW = 2.3651392480160473e-7;
 
 // The tables stay unexported: reading an exported table costs half as much again. Made with 60-digit decimal arithmetic.
 // biome-ignore format: 2^(k/128), k = 0 to 127

@@ -19,9 +19,11 @@ export function ciddorFactors(
 ): { dryFactor: number; vapourFactor: number } {
   const z = compressibility(pressurePa, temperatureK, waterMoleFraction);
   const moles = pressurePa / (z * temperatureK);
-  const dryReference = DRY_REFERENCE_PA / (compressibility(DRY_REFERENCE_PA, DRY_REFERENCE_K, 0) * DRY_REFERENCE_K);
+  const dryReference =
+    DRY_REFERENCE_PA / (compressibility(DRY_REFERENCE_PA, DRY_REFERENCE_K, 0) * DRY_REFERENCE_K);
   const vapourReference =
-    VAPOUR_REFERENCE_PA / (compressibility(VAPOUR_REFERENCE_PA, VAPOUR_REFERENCE_K, 1) * VAPOUR_REFERENCE_K);
+    VAPOUR_REFERENCE_PA /
+    (compressibility(VAPOUR_REFERENCE_PA, VAPOUR_REFERENCE_K, 1) * VAPOUR_REFERENCE_K);
   const co2 = 1 + CO2_INDEX_PER_PPM * (co2Ppm - CO2_REFERENCE_PPM);
   return {
     dryFactor: (co2 * moles * (1 - waterMoleFraction)) / dryReference,

@@ -11,7 +11,11 @@ const C1 = -2.376e-6; // Pa-1
 const D = 1.83e-11; // K2 Pa-2
 const E = -0.765e-8; // K2 Pa-2
 
-export function compressibility(pressurePa: number, temperatureK: number, waterMoleFraction: number): number {
+export function compressibility(
+  pressurePa: number,
+  temperatureK: number,
+  waterMoleFraction: number,
+): number {
   const t = temperatureK - KELVINS_AT_ZERO_CELSIUS;
   const x = waterMoleFraction;
   const ratio = pressurePa / temperatureK;

@@ -63,7 +63,7 @@ export function moistAir(state: MoistAirInput): MoistAir {
     enhancementFactor(pressurePa, temperatureK) * saturationVapourPressure(temperatureK);
   const vapourPressurePa = relativeHumidity * saturated;
   if (vapourPressurePa > pressurePa) {
-    const most = `0 to ${pressurePa / saturated} fraction at ${temperatureK} K and ${pressurePa} Pa (more would boil)`;
+    const most = `0 to ${pressurePa / saturated} at ${temperatureK} K and ${pressurePa} Pa (more would boil)`;
     refuse(relativeHumidity, most, "", "relativeHumidity", "moistAir");
   }
   const waterMoleFraction = vapourPressurePa / pressurePa;
