@@ -25,7 +25,7 @@ export function checkRising(
   let before = 0;
   for (let i = 0; i < wavelengthsNm.length; i++) {
     const here = wavelengthsNm[i]!;
-    if (!(here > before && here < Number.POSITIVE_INFINITY)) {
+    if (!(typeof here === "number" && here > before && here < Number.POSITIVE_INFINITY)) {
       const range = i === 0 ? "above 0 nm" : `above the one before it, ${before} nm`;
       refuse(here, range, "", `${argument}[${i}]`, functionName);
     }

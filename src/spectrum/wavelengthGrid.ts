@@ -29,7 +29,7 @@ export function wavelengthGrid(
 ): Float64Array {
   checkNumber(startNm, 1, 1e9, "nm", "startNm", "wavelengthGrid");
   checkNumber(stopNm, startNm, 1e9, "nm", "stopNm", "wavelengthGrid");
-  if (!(stepNm > 0 && stepNm < Number.POSITIVE_INFINITY)) {
+  if (!(typeof stepNm === "number" && stepNm > 0 && stepNm < Number.POSITIVE_INFINITY)) {
     refuse(stepNm, "greater than 0 nm", "", "stepNm", "wavelengthGrid");
   }
   const steps = Math.floor((stopNm - startNm) / stepNm + 1e-9);
