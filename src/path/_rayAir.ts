@@ -1,0 +1,76 @@
+/** What a ray needs to know of the air: refractivity and densities at any height, and the heights where they have kinks. */
+import { layerBreaks, layerDensity } from "../air/_layerDensity.js";
+import { fillState, profileLayer, VAPOUR_LIGHTNESS } from "../air/_profileState.js";
+import {
+  type RefractivityFactors,
+  refractivity,
+  refractivityFactors,
+} from "../air/_refractivityCore.js";
+import { GEOPOTENTIAL_RADIUS_M, geopotentialHeight } from "../air/_standardLayers.js";
+import type { AirLayer, AirProfile } from "../air/airProfile.js";
+import type { ConstituentLayer } from "../air/constituentLayer.js";
+
+/** Air and constituents around an observer at one wavelength. */
+export interface RayAir {
+  readonly profile: AirProfile;
+  readonly factors: RefractivityFactors;
+  readonly constituents: readonly ConstituentLayer[];
+  readonly earthRadiusM: number;
+  readonly observerM: number;
+  /** Heights, m, where the air or a constituent changes its law, rising, from the lowest to the highest of the profile. */
+  readonly breaksM: readonly number[];
+}
+
+export function rayAir(
+  profile: AirProfile,
+  constituents: readonly ConstituentLayer[],
+  wavelengthNm: number,
+  earthRadiusM: number,
+  observerM: number,
+): RayAir {
+  const { lowestM, highestM } = profile;
+  const inside = [
+    ...profile.layers.map(({ baseM }) => geometricHeight(baseM)),
+    ...constituents.flatMap(layerBreaks),
+  ].filter((heightM) => heightM > lowestM && heightM < highestM);
+  const breaksM = [...new Set([lowestM, ...inside, highestM])].sort((a, b) => a - b);
+  const factors = refractivityFactors(wavelengthNm, profile.co2Ppm);
+  return { profile, factors, constituents, earthRadiusM, observerM, breaksM };
+}
+
+/** The layer of the profile around a geometric height. */
+export function layerAt({ profile }: RayAir, heightM: number): AirLayer {
+  return profile.layers[profileLayer(profile, geopotentialHeight(heightM))]!;
+}
+
+/** n - 1 at a height in a known layer; leaves temperature, pressure and vapour in `state`. */
+export function refractivityAt(
+  air: RayAir,
+  layer: AirLayer,
+  heightM: number,
+  state: Float64Array,
+): number {
+  fillState(air.profile, layer, heightM, state);
+  return refractivity(air.factors, state[0]!, state[1]!, state[2]!);
+}
+
+/** Mass density of moist air in a unit of its own, from a state. */
+export function airDensityIn(state: Float64Array): number {
+  return (state[1]! * (1 - VAPOUR_LIGHTNESS * state[2]!)) / state[0]!;
+}
+
+/** Adds `length` times the density of each constituent at a height to `sums`, from place 2 on. */
+export function addConstituents(
+  { constituents }: RayAir,
+  heightM: number,
+  length: number,
+  sums: Float64Array,
+): void {
+  for (let i = 0; i < constituents.length; i++) {
+    sums[i + 2]! += length * layerDensity(constituents[i]!, heightM);
+  }
+}
+
+function geometricHeight(geopotentialM: number): number {
+  return (GEOPOTENTIAL_RADIUS_M * geopotentialM) / (GEOPOTENTIAL_RADIUS_M - geopotentialM);
+}

@@ -1,0 +1,66 @@
+/** A whole ray: from the observer, down to its lowest point if it dips, and up to the end of the air. */
+import { refuse } from "../_check.js";
+import { atan2, cos, sin, sqrt } from "../_numeric.js";
+import { DEGREES_PER_RADIAN, RADIANS_PER_DEGREE } from "../units.js";
+import { lowestPoint, steepestDip } from "./_lowestPoint.js";
+import { type RayAir, layerAt, refractivityAt } from "./_rayAir.js";
+import { sumAlong } from "./_sumAlong.js";
+
+/** Greatest apparent zenith angle, degrees, that passes the ground. */
+export function apparentHorizonDeg(air: RayAir): number {
+  return 90 + steepestDip(air) * DEGREES_PER_RADIAN;
+}
+
+/**
+ * Refraction in radians at [0], and what the ray collects of air at [1] and of each constituent from [2] on, in the units of
+ * `verticalColumns`.
+ */
+export function traceRay(air: RayAir, apparentZenithDeg: number, name: string): Float64Array {
+  const elevation = (90 - apparentZenithDeg) * RADIANS_PER_DEGREE;
+  const cosine = sin(elevation);
+  const sine = cos(elevation);
+  const { observerM, earthRadiusM, profile } = air;
+  const sums = new Float64Array(2 + air.constituents.length);
+  const passes =
+    cosine >= 0
+      ? sumAlong(air, observerM, cosine, sine, profile.highestM, sums)
+      : sumDipping(air, cosine, sine, sums, apparentZenithDeg, name);
+  if (!passes) refuseTrapped(apparentZenithDeg, name);
+  const here = refractivityAt(air, layerAt(air, observerM), observerM, new Float64Array(3));
+  const invariant = (1 + here) * (earthRadiusM + observerM) * sine;
+  const top = earthRadiusM + profile.highestM;
+  const outside = atan2(invariant, sqrt((top - invariant) * (top + invariant)));
+  sums[0]! += outside - apparentZenithDeg * RADIANS_PER_DEGREE;
+  return sums;
+}
+
+/** What stands above the observer, of air at [1] and of each constituent from [2] on. */
+export function verticalColumns(air: RayAir): Float64Array {
+  const columns = new Float64Array(2 + air.constituents.length);
+  sumAlong(air, air.observerM, 1, 0, air.profile.highestM, columns);
+  return columns;
+}
+
+function sumDipping(
+  air: RayAir,
+  cosine: number,
+  sine: number,
+  sums: Float64Array,
+  apparentZenithDeg: number,
+  name: string,
+): boolean {
+  const lowestM = lowestPoint(air, (cosine * cosine) / (1 + sine));
+  if (lowestM === undefined) {
+    const range = `0 to ${apparentHorizonDeg(air)} degrees (beyond that the ray meets the ground at ${air.profile.lowestM} m)`;
+    refuse(apparentZenithDeg, range, "", "apparentZenithDeg", name);
+  }
+  return (
+    sumAlong(air, lowestM, 0, 1, air.observerM, sums) &&
+    sumAlong(air, lowestM, 0, 1, air.profile.highestM, sums)
+  );
+}
+
+function refuseTrapped(apparentZenithDeg: number, name: string): never {
+  const range = "less near 90 degrees (the air above is so layered that this ray is bent back down)";
+  refuse(apparentZenithDeg, range, "", "apparentZenithDeg", name);
+}
