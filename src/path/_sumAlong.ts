@@ -44,8 +44,7 @@ export function sumAlong(
       const here = refractivityAt(air, layer, startM + climb, state);
       const radius = startRadius + climb;
       // 1 - (n r at the start) / (n r here), which is what the sine loses
-      const loss =
-        ((1 + here) * climb + startRadius * (here - start)) / ((1 + here) * radius);
+      const loss = ((1 + here) * climb + startRadius * (here - start)) / ((1 + here) * radius);
       const squared = cosine * cosine + sine * sine * loss * (2 - loss);
       if (!(squared > 0)) return false;
       const weight = half * (i < 8 ? GAUSS_WEIGHTS[7 - i]! : GAUSS_WEIGHTS[i - 8]!);

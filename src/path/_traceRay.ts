@@ -61,6 +61,7 @@ function sumDipping(
 }
 
 function refuseTrapped(apparentZenithDeg: number, name: string): never {
-  const range = "less near 90 degrees (the air above is so layered that this ray is bent back down)";
+  const range =
+    "less near 90 degrees (the air above is so layered that this ray is bent back down)";
   refuse(apparentZenithDeg, range, "", "apparentZenithDeg", name);
 }
