@@ -1,6 +1,7 @@
 /** The standard atmosphere made to pass through a station's readings. */
 import { checkNumber } from "../_check.js";
 import type { Metres } from "../units.js";
+import { VAPOUR_LIGHTNESS } from "./_profileState.js";
 import { raisedStandard } from "./_raisedStandard.js";
 import {
   geopotentialHeight,
@@ -25,7 +26,7 @@ export interface StandardProfileInput extends MoistAirInput {
  * Model: one offset added to the standard's temperature at all heights so that it meets the measured one; pressure
  * integrated up and down from the measured value in hydrostatic balance with that temperature and the vapour's lightness;
  * mole fraction of vapour over temperature falls exponentially, so that the vapour's density has a scale height of 2 km at
- * the station and 1.85 km in the upper troposphere; CO2 the same everywhere. The ground is at sea level, or at a station
+ * the station and 1.9 km in the upper troposphere; CO2 the same everywhere. The ground is at sea level, or at a station
  * below it. Temperatures above 80 km are molecular-scale ones (0.04 % above the kinetic at 86 km).
  * Validity: state as `moistAir`; altitude -1000 to 20 000 m, enforced. A mean shape: inversions and fronts need `tabulatedProfile`.
  * Accuracy: 1e-9 relative in pressure against hydrostatic balance integrated by Runge and Kutta; 1e-12 against
@@ -46,13 +47,14 @@ export interface StandardProfileInput extends MoistAirInput {
  *   altitudeM: 0,
  *   co2Ppm: 425,
  * });
- * airAtHeight(5000, profile).pressurePa; // => 55583
+ * airAtHeight(5000, profile).pressurePa; // => 55968
  */
 export function standardProfile(station: StandardProfileInput): AirProfile {
   const air = moistAir(station);
   const { altitudeM } = station;
   checkNumber(altitudeM, -1000, 20_000, "m", "altitudeM", "standardProfile");
   const waterOriginM = geopotentialHeight(altitudeM);
+  const weight = HYDROSTATIC_K_PER_M * (1 - VAPOUR_LIGHTNESS * air.waterMoleFraction);
   const offsetK = air.temperatureK - standardMolecularTemperature(altitudeM);
   return {
     lowestM: Math.min(0, altitudeM),
@@ -61,6 +63,6 @@ export function standardProfile(station: StandardProfileInput): AirProfile {
     layers: raisedStandard(waterOriginM, air.pressurePa, offsetK),
     waterOriginM,
     waterPerK: air.waterMoleFraction / air.temperatureK,
-    waterScaleM: 1 / (1 / VAPOUR_SCALE_M - HYDROSTATIC_K_PER_M / air.temperatureK),
+    waterScaleM: 1 / (1 / VAPOUR_SCALE_M - weight / air.temperatureK),
   };
 }

@@ -16,7 +16,7 @@ export function apparentOf(air: RayAir, trueZenithDeg: number, name: string): nu
   const horizon = apparentHorizonDeg(air);
   const upper = Math.min(trueZenithDeg, horizon);
   const high = excess(upper);
-  if (high < 0) {
+  if (high < -TOLERANCE_DEG) {
     const range = `0 to ${horizon + refraction(horizon)} degrees (beyond that the ground hides it)`;
     refuse(trueZenithDeg, range, "", "trueZenithDeg", name);
   }

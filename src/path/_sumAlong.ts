@@ -59,6 +59,17 @@ export function sumAlong(
   return true;
 }
 
+/** The same from the lowest point to a height less than a millimetre above it, where the ray's cosine is given. */
+export function sumLevel(air: RayAir, heightM: number, cosine: number, sums: Float64Array): void {
+  const state = new Float64Array(3);
+  const radius = air.earthRadiusM + heightM;
+  const here = refractivityAt(air, layerAt(air, heightM), heightM, state);
+  const length = (2 * cosine) / squaredCosineGrowth(air, heightM, radius, here, state);
+  sums[0]! += length / radius;
+  sums[1]! += length * airDensityIn(state);
+  addConstituents(air, heightM, length, sums);
+}
+
 /** d(cos²)/dh of a horizontal ray: 2 (1/r + n'/n), n' by a one-sided difference of second order; kept above a small positive number. */
 function squaredCosineGrowth(
   air: RayAir,

@@ -3,8 +3,11 @@ import { refuse } from "../_check.js";
 import { atan2, cos, sin, sqrt } from "../_numeric.js";
 import { DEGREES_PER_RADIAN, RADIANS_PER_DEGREE } from "../units.js";
 import { lowestPoint, steepestDip } from "./_lowestPoint.js";
-import { type RayAir, layerAt, refractivityAt } from "./_rayAir.js";
-import { sumAlong } from "./_sumAlong.js";
+import { layerAt, type RayAir, refractivityAt } from "./_rayAir.js";
+import { sumAlong, sumLevel } from "./_sumAlong.js";
+
+/** Cosine of the smallest dip whose lowest point (0.4 mm down) is worth finding; nearer, the ray is a parabola. */
+const LEAST_DIP = 1e-5;
 
 /** Greatest apparent zenith angle, degrees, that passes the ground. */
 export function apparentHorizonDeg(air: RayAir): number {
@@ -21,11 +24,13 @@ export function traceRay(air: RayAir, apparentZenithDeg: number, name: string): 
   const sine = cos(elevation);
   const { observerM, earthRadiusM, profile } = air;
   const sums = new Float64Array(2 + air.constituents.length);
-  const passes =
-    cosine >= 0
-      ? sumAlong(air, observerM, cosine, sine, profile.highestM, sums)
-      : sumDipping(air, cosine, sine, sums, apparentZenithDeg, name);
-  if (!passes) refuseTrapped(apparentZenithDeg, name);
+  if (cosine < 0) {
+    const dip = sumDip(air, cosine, sine, apparentZenithDeg, name);
+    for (let i = 0; i < sums.length; i++) sums[i] = 2 * dip[i]!;
+  }
+  if (!sumAlong(air, observerM, Math.abs(cosine), sine, profile.highestM, sums)) {
+    refuseTrapped(apparentZenithDeg, name);
+  }
   const here = refractivityAt(air, layerAt(air, observerM), observerM, new Float64Array(3));
   const invariant = (1 + here) * (earthRadiusM + observerM) * sine;
   const top = earthRadiusM + profile.highestM;
@@ -41,23 +46,23 @@ export function verticalColumns(air: RayAir): Float64Array {
   return columns;
 }
 
-function sumDipping(
+/** Twice the way from the lowest point to the observer, whom the ray passes again at the mirrored angle. */
+function sumDip(
   air: RayAir,
   cosine: number,
   sine: number,
-  sums: Float64Array,
-  apparentZenithDeg: number,
+  zenithDeg: number,
   name: string,
-): boolean {
+): Float64Array {
+  const dip = new Float64Array(2 + air.constituents.length);
   const lowestM = lowestPoint(air, (cosine * cosine) / (1 + sine));
   if (lowestM === undefined) {
     const range = `0 to ${apparentHorizonDeg(air)} degrees (beyond that the ray meets the ground at ${air.profile.lowestM} m)`;
-    refuse(apparentZenithDeg, range, "", "apparentZenithDeg", name);
+    refuse(zenithDeg, range, "", "apparentZenithDeg", name);
   }
-  return (
-    sumAlong(air, lowestM, 0, 1, air.observerM, sums) &&
-    sumAlong(air, lowestM, 0, 1, air.profile.highestM, sums)
-  );
+  if (-cosine < LEAST_DIP) sumLevel(air, air.observerM, -cosine, dip);
+  else if (!sumAlong(air, lowestM, 0, 1, air.observerM, dip)) refuseTrapped(zenithDeg, name);
+  return dip;
 }
 
 function refuseTrapped(apparentZenithDeg: number, name: string): never {

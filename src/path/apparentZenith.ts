@@ -27,7 +27,7 @@ import type { PathInput } from "./pathInput.js";
  *   co2Ppm: 425,
  * });
  * const input = { profile, altitudeM: 0, wavelengthNm: 550, earthRadiusM: 6371000 };
- * apparentZenith(90, input); // => 89.5182
+ * apparentZenith(90, input); // => 89.535147
  */
 export function apparentZenith(trueZenithDeg: Degrees, input: PathInput<string>): Degrees {
   const name = "apparentZenith";

@@ -5,6 +5,8 @@ export { airMassShell, type Shell } from "./airMassShell.js";
 export { airMassYoung } from "./airMassYoung.js";
 export { apparentZenith } from "./apparentZenith.js";
 export type { SurfaceAir } from "./_checkSurface.js";
+export { type DispersionInput, differentialRefraction } from "./differentialRefraction.js";
+export { dispersionOffset } from "./dispersionOffset.js";
 export { earthCurvatureRadius } from "./earthCurvatureRadius.js";
 export type { PathInput } from "./pathInput.js";
 export { type RefractedPath, refractedPath } from "./refractedPath.js";
