@@ -13,9 +13,9 @@ export function layerDensity(layer: ConstituentLayer, heightM: number): number {
 export function layerBreaks(layer: ConstituentLayer): number[] {
   if (layer.shape === "tabulated") return [...layer.heightsM];
   if (layer.shape === "exponential") {
-    return [4, 8, 12, 16, 20, 28, 36].map((times) => times * layer.scaleHeightM);
+    return [8, 20, 44].map((times) => times * layer.scaleHeightM);
   }
-  return [-6, -4, -2, 0, 2, 4, 6].map((d) => layer.heightM + d * layer.standardDeviationM);
+  return [-7, -3.5, 0, 3.5, 7].map((d) => layer.heightM + d * layer.standardDeviationM);
 }
 
 function tableDensity({ heightsM, densities }: TabulatedLayer, heightM: number): number {

@@ -1,5 +1,6 @@
 /** Where a ray that starts downward turns, and how steeply it may start without meeting the ground. */
 import { asin, sqrt } from "../_numeric.js";
+import { DEGREES_PER_RADIAN } from "../units.js";
 import { layerAt, type RayAir, refractivityAt } from "./_rayAir.js";
 import { rootBetween } from "./_rootBetween.js";
 
@@ -17,24 +18,31 @@ export function lowestPoint(air: RayAir, deficit: number): number | undefined {
     const excess = (heightM: number): number => aim.above(heightM, middleM) - target;
     // the ground itself counts as passed: within a tenth of a micrometre
     const low = excess(lowM) - 1e-7;
-    if (low <= 0) return rootBetween(excess, lowM, low, highM, high, 1e-10);
+    if (low <= 0) return rootBetween(excess, lowM, low, highM, high, 1e-13);
     highM = lowM;
     high = low;
   }
   return undefined;
 }
 
-/** Greatest angle below the horizontal, radians, at which a ray passes the ground. */
-export function steepestDip(air: RayAir): number {
+/**
+ * Elevations, degrees, 0 and falling, at which a ray just grazes each kink of the air below the observer; the last grazes the
+ * ground, or what hides it.
+ */
+export function grazingDips(air: RayAir): number[] {
   const aim = raysProduct(air);
+  const dips = [0];
   let least = 0;
   let highM = air.observerM;
   for (const lowM of stepsDown(air)) {
-    least = Math.min(least, aim.above(lowM, (lowM + highM) / 2));
+    const excess = aim.above(lowM, (lowM + highM) / 2);
     highM = lowM;
+    if (excess >= least) continue;
+    least = excess;
+    const deficit = -least / aim.atObserver;
+    dips.push(-asin(sqrt(deficit * (2 - deficit))) * DEGREES_PER_RADIAN);
   }
-  const deficit = -least / aim.atObserver;
-  return asin(sqrt(deficit * (2 - deficit)));
+  return dips;
 }
 
 /** n r, as its excess over that at the observer, in metres. */
@@ -55,6 +63,6 @@ function raysProduct(air: RayAir): RaysProduct {
   return { atObserver: (1 + here) * radius, above };
 }
 
-function stepsDown({ breaksM, observerM }: RayAir): number[] {
-  return breaksM.filter((heightM) => heightM < observerM).reverse();
+function stepsDown({ kinksM, observerM }: RayAir): number[] {
+  return kinksM.filter((heightM) => heightM < observerM).reverse();
 }

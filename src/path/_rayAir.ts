@@ -17,8 +17,10 @@ export interface RayAir {
   readonly constituents: readonly ConstituentLayer[];
   readonly earthRadiusM: number;
   readonly observerM: number;
-  /** Heights, m, where the air or a constituent changes its law, rising, from the lowest to the highest of the profile. */
+  /** Heights, m, between which everything is smooth and changes little, rising, from the profile's lowest to its highest. */
   readonly breaksM: readonly number[];
+  /** Those of them where the air or a constituent has a kink, and the lowest. */
+  readonly kinksM: readonly number[];
 }
 
 export function rayAir(
@@ -28,14 +30,23 @@ export function rayAir(
   earthRadiusM: number,
   observerM: number,
 ): RayAir {
-  const { lowestM, highestM } = profile;
-  const inside = [
-    ...profile.layers.map(({ baseM }) => geometricHeight(baseM)),
-    ...constituents.flatMap(layerBreaks),
-  ].filter((heightM) => heightM > lowestM && heightM < highestM);
-  const breaksM = [...new Set([lowestM, ...inside, highestM])].sort((a, b) => a - b);
-  const factors = refractivityFactors(wavelengthNm, profile.co2Ppm);
-  return { profile, factors, constituents, earthRadiusM, observerM, breaksM };
+  const bases = profile.layers.map(({ baseM }) => geometricHeight(baseM));
+  const tables = constituents.filter(({ shape }) => shape === "tabulated");
+  return {
+    profile,
+    factors: refractivityFactors(wavelengthNm, profile.co2Ppm),
+    constituents,
+    earthRadiusM,
+    observerM,
+    breaksM: levels(profile, [...bases, ...constituents.flatMap(layerBreaks)]),
+    kinksM: levels(profile, [...bases, ...tables.flatMap(layerBreaks)]),
+  };
+}
+
+/** The heights inside the profile and its ends, rising, each once. */
+function levels({ lowestM, highestM }: AirProfile, heightsM: readonly number[]): number[] {
+  const inside = heightsM.filter((heightM) => heightM > lowestM && heightM < highestM);
+  return [...new Set([lowestM, ...inside, highestM])].sort((a, b) => a - b);
 }
 
 /** The layer of the profile around a geometric height. */

@@ -5,6 +5,8 @@ import { addConstituents, airDensityIn, layerAt, type RayAir, refractivityAt } f
 
 /** A panel reaches at most this many times as high above the start as it begins. */
 const WIDENING = 16;
+/** Height of the first panel, m: rays a hundredth of a degree off the horizontal need it. */
+const FIRST_PANEL_M = 50;
 /** Smallest growth of the squared cosine with height that the variable is made for, as a share of a straight ray's. */
 const LEAST_GROWTH = 0.05;
 
@@ -65,6 +67,7 @@ export function sumLevel(air: RayAir, heightM: number, cosine: number, sums: Flo
   const radius = air.earthRadiusM + heightM;
   const here = refractivityAt(air, layerAt(air, heightM), heightM, state);
   const length = (2 * cosine) / squaredCosineGrowth(air, heightM, radius, here, state);
+  refractivityAt(air, layerAt(air, heightM), heightM, state);
   sums[0]! += length / radius;
   sums[1]! += length * airDensityIn(state);
   addConstituents(air, heightM, length, sums);
@@ -88,17 +91,17 @@ function squaredCosineGrowth(
 
 /** Ends of the quadrature's panels, rising, the last `endM`. */
 function panelEnds({ breaksM }: RayAir, startM: number, endM: number): number[] {
+  const climbs = breaksM.filter((m) => m > startM && m < endM).map((m) => m - startM);
+  climbs.push(endM - startM);
   const ends: number[] = [];
   let from = 0;
-  const add = (climb: number): void => {
-    while (from > 0 && climb > WIDENING * from) {
-      from *= WIDENING;
+  for (const climb of climbs) {
+    while (climb > WIDENING * Math.max(from, FIRST_PANEL_M / WIDENING)) {
+      from = from === 0 ? FIRST_PANEL_M : WIDENING * from;
       ends.push(startM + from);
     }
     from = climb;
     ends.push(startM + climb);
-  };
-  for (const heightM of breaksM) if (heightM > startM && heightM < endM) add(heightM - startM);
-  add(endM - startM);
+  }
   return ends;
 }

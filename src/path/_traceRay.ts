@@ -1,8 +1,8 @@
 /** A whole ray: from the observer, down to its lowest point if it dips, and up to the end of the air. */
 import { refuse } from "../_check.js";
 import { atan2, cos, sin, sqrt } from "../_numeric.js";
-import { DEGREES_PER_RADIAN, RADIANS_PER_DEGREE } from "../units.js";
-import { lowestPoint, steepestDip } from "./_lowestPoint.js";
+import { RADIANS_PER_DEGREE } from "../units.js";
+import { grazingDips, lowestPoint } from "./_lowestPoint.js";
 import { layerAt, type RayAir, refractivityAt } from "./_rayAir.js";
 import { sumAlong, sumLevel } from "./_sumAlong.js";
 
@@ -11,7 +11,7 @@ const LEAST_DIP = 1e-5;
 
 /** Greatest apparent zenith angle, degrees, that passes the ground. */
 export function apparentHorizonDeg(air: RayAir): number {
-  return 90 + steepestDip(air) * DEGREES_PER_RADIAN;
+  return 90 - grazingDips(air).at(-1)!;
 }
 
 /**
