@@ -44,6 +44,13 @@ export function fillState(
   out[2] = water;
 }
 
+/** ln of pressure over that at the layer's base after a climb in geopotential metres, the vapour's relief apart. */
+export function logPressureAfter(layer: AirLayer, climb: number): number {
+  return layer.gradient === 0
+    ? (-layer.hydrostaticKPerM * climb) / layer.baseK
+    : (-layer.hydrostaticKPerM / layer.gradient) * log1p((layer.gradient * climb) / layer.baseK);
+}
+
 /** By how much ln(pressure) exceeds that of dry air since the station: vapour is lighter (exact for exponential x / T). */
 function vapourRelief(profile: AirProfile, hydrostaticKPerM: number, fall: number): number {
   const weight = VAPOUR_LIGHTNESS * hydrostaticKPerM * profile.waterPerK * profile.waterScaleM;

@@ -1,18 +1,11 @@
 /** The standard atmosphere made to pass through a station's readings. */
 import { checkNumber } from "../_check.js";
 import type { Metres } from "../units.js";
-import { VAPOUR_LIGHTNESS } from "./_profileState.js";
 import { raisedStandard } from "./_raisedStandard.js";
-import {
-  geopotentialHeight,
-  HYDROSTATIC_K_PER_M,
-  standardMolecularTemperature,
-} from "./_standardLayers.js";
+import { geopotentialHeight, standardMolecularTemperature } from "./_standardLayers.js";
+import { vapourScale } from "./_vapourScale.js";
 import type { AirProfile } from "./airProfile.js";
 import { type MoistAirInput, moistAir } from "./moistAir.js";
-
-/** Scale height of the vapour's density at the station, m (common practice). */
-const VAPOUR_SCALE_M = 2000;
 
 /** What `standardProfile` takes: the surface state at the station. */
 export interface StandardProfileInput extends MoistAirInput {
@@ -54,7 +47,6 @@ export function standardProfile(station: StandardProfileInput): AirProfile {
   const { altitudeM } = station;
   checkNumber(altitudeM, -1000, 20_000, "m", "altitudeM", "standardProfile");
   const waterOriginM = geopotentialHeight(altitudeM);
-  const weight = HYDROSTATIC_K_PER_M * (1 - VAPOUR_LIGHTNESS * air.waterMoleFraction);
   const offsetK = air.temperatureK - standardMolecularTemperature(altitudeM);
   return {
     lowestM: Math.min(0, altitudeM),
@@ -63,6 +55,6 @@ export function standardProfile(station: StandardProfileInput): AirProfile {
     layers: raisedStandard(waterOriginM, air.pressurePa, offsetK),
     waterOriginM,
     waterPerK: air.waterMoleFraction / air.temperatureK,
-    waterScaleM: 1 / (1 / VAPOUR_SCALE_M - weight / air.temperatureK),
+    waterScaleM: vapourScale(air.temperatureK, air.waterMoleFraction),
   };
 }

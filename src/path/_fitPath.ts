@@ -1,70 +1,34 @@
 /** Fits a path in all its angles. */
 import { DEGREES_PER_RADIAN } from "../units.js";
-import { apparentElevation, massAt, refractionAt } from "./_atElevation.js";
-import { fitPieces } from "./_fitPieces.js";
-import { grazingDips } from "./_lowestPoint.js";
-import { dippingElevation, nearSine, risingElevation, risingReach } from "./_pathVariable.js";
+import { fitDipping, fitRising, fitRisingTrue } from "./_fitAngles.js";
+import { checkedColumns } from "./_massesOf.js";
 import type { RayAir } from "./_rayAir.js";
-import { traceRay } from "./_traceRay.js";
-import type { DippingFit, PathFit, PreparedPath } from "./preparedPath.js";
+import { apparentHorizonDeg, traceRay } from "./_traceRay.js";
+import type { PreparedPath } from "./preparedPath.js";
 
-/** Error allowed in refraction times reach over sine, degrees: 5e-6 arcsec at the horizon, less above. */
-const RISING_TOLERANCE = 1e-10;
-/** Error allowed in refraction, degrees, of rays that dip: 4e-6 arcsec. */
-const DIPPING_TOLERANCE = 1e-9;
-
-/** What a ray at an apparent elevation collects, over `columns`; refraction in degrees first. */
-function rayAt(
+/** The prepared path of air ready for tracing, on the same pieces as another if one is given. */
+export function fitPath<Key extends string>(
   air: RayAir,
-  columns: Float64Array,
-  elevationDeg: number,
+  keys: readonly Key[],
   name: string,
-): Float64Array {
-  const sums = traceRay(air, 90 - elevationDeg, name);
-  sums[0]! *= DEGREES_PER_RADIAN;
-  for (let q = 1; q < sums.length; q++) sums[q]! /= columns[q]!;
-  return sums;
-}
-
-export function fitRising(air: RayAir, columns: Float64Array, name: string): PathFit {
-  return fitPieces(columns.length, 8, RISING_TOLERANCE, (place, pieces) => {
-    const elevation = risingElevation(place, 90, pieces);
-    const values = rayAt(air, columns, elevation, name);
-    return scaled(values, risingReach(elevation, 90, 1 / 8100), nearSine(90 - elevation, 90));
-  });
-}
-
-export function fitDipping(air: RayAir, columns: Float64Array, name: string): DippingFit[] {
-  const dips = grazingDips(air);
-  return dips.slice(1).map((bottomDeg, i) => {
-    const topDeg = dips[i]!;
-    const fit = fitPieces(columns.length, 16, DIPPING_TOLERANCE, (place, pieces) =>
-      rayAt(air, columns, dippingElevation(place, topDeg, bottomDeg, pieces), name),
-    );
-    return { topDeg, bottomDeg, ...fit };
-  });
-}
-
-/** The rising rays again over their true elevations, from the fit over apparent ones. */
-export function fitRisingTrue(path: PreparedPath<string>): PathFit {
-  const span = 90 + path.levelRefractionDeg;
-  const quantities = path.rising.coefficients.length;
-  return fitPieces(quantities, path.rising.pieces, RISING_TOLERANCE, (place, pieces) => {
-    const above = risingElevation(place, span, pieces);
-    const elevation = Math.max(0, apparentElevation(path, above - path.levelRefractionDeg));
-    const values = new Float64Array(quantities);
-    values[0] = refractionAt(path, elevation);
-    for (let q = 1; q < quantities; q++) values[q] = massAt(path, elevation, q);
-    return scaled(
-      values,
-      risingReach(above, span, 1 / (span * span)),
-      nearSine(span - above, span),
-    );
-  });
-}
-
-function scaled(values: Float64Array, reach: number, sine: number): Float64Array {
-  values[0]! /= sine;
-  for (let q = 0; q < values.length; q++) values[q]! *= reach;
-  return values;
+  like?: PreparedPath<Key>,
+): PreparedPath<Key> {
+  const columns = checkedColumns(air, keys, name);
+  const refraction = (zenithDeg: number): number =>
+    traceRay(air, zenithDeg, name)[0]! * DEGREES_PER_RADIAN;
+  const horizonApparentZenithDeg = apparentHorizonDeg(air);
+  const rising = fitRising(air, columns, name, like?.rising);
+  const apparent = {
+    altitudeM: air.observerM,
+    wavelengthNm: air.wavelengthNm,
+    earthRadiusM: air.earthRadiusM,
+    keys,
+    horizonApparentZenithDeg,
+    horizonTrueZenithDeg: horizonApparentZenithDeg + refraction(horizonApparentZenithDeg),
+    levelRefractionDeg: refraction(90),
+    rising,
+    risingTrue: rising,
+    dipping: fitDipping(air, columns, name, like?.dipping),
+  };
+  return { ...apparent, risingTrue: fitRisingTrue(apparent, like?.risingTrue) };
 }

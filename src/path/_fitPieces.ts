@@ -10,7 +10,7 @@ const MOST_PIECES = 512;
 /** Gives the quantities, refraction first, at a place from 0 to `pieces`. */
 export type Sample = (place: number, pieces: number) => ArrayLike<number>;
 
-/** `refractionTolerance` is absolute, in the unit of the first quantity. */
+/** `refractionTolerance` is absolute, in the unit of the first quantity; Infinity keeps to the fewest pieces. */
 export function fitPieces(
   quantities: number,
   fewest: number,
@@ -19,7 +19,8 @@ export function fitPieces(
 ): PathFit {
   for (let pieces = fewest; ; pieces *= 2) {
     const fit = fitThrough(quantities, pieces, sample);
-    if (pieces >= MOST_PIECES || isClose(fit, refractionTolerance, sample)) return fit;
+    if (refractionTolerance === Number.POSITIVE_INFINITY || pieces >= MOST_PIECES) return fit;
+    if (isClose(fit, refractionTolerance, sample)) return fit;
   }
 }
 

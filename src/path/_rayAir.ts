@@ -13,6 +13,7 @@ import type { ConstituentLayer } from "../air/constituentLayer.js";
 /** Air and constituents around an observer at one wavelength. */
 export interface RayAir {
   readonly profile: AirProfile;
+  readonly wavelengthNm: number;
   readonly factors: RefractivityFactors;
   readonly constituents: readonly ConstituentLayer[];
   readonly earthRadiusM: number;
@@ -34,6 +35,7 @@ export function rayAir(
   const tables = constituents.filter(({ shape }) => shape === "tabulated");
   return {
     profile,
+    wavelengthNm,
     factors: refractivityFactors(wavelengthNm, profile.co2Ppm),
     constituents,
     earthRadiusM,

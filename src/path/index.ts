@@ -18,6 +18,12 @@ export { dispersionOffset } from "./dispersionOffset.js";
 export { earthCurvatureRadius } from "./earthCurvatureRadius.js";
 export type { PathInput } from "./pathInput.js";
 export type { DippingFit, PathFit, PreparedPath } from "./preparedPath.js";
+export { pathInWeather } from "./pathInWeather.js";
+export {
+  prepareWeatherPaths,
+  type WeatherPathInput,
+  type WeatherPaths,
+} from "./prepareWeatherPaths.js";
 export { preparePath } from "./preparePath.js";
 export { type RefractedPath, refractedPath } from "./refractedPath.js";
 export { refractionBennett } from "./refractionBennett.js";

@@ -1,9 +1,6 @@
 /** Refraction and every air mass of one station state, ready for fast use. */
-import { DEGREES_PER_RADIAN } from "../units.js";
 import { checkPathInput, constituentsOf } from "./_checkPathInput.js";
-import { fitDipping, fitRising, fitRisingTrue } from "./_fitPath.js";
-import { checkedColumns } from "./_massesOf.js";
-import { apparentHorizonDeg, traceRay } from "./_traceRay.js";
+import { fitPath } from "./_fitPath.js";
 import type { PathInput } from "./pathInput.js";
 import type { PreparedPath } from "./preparedPath.js";
 
@@ -39,25 +36,7 @@ import type { PreparedPath } from "./preparedPath.js";
  * refractionOnTruePath(90, path) * 60; // => 27.97006
  */
 export function preparePath<Key extends string = never>(input: PathInput<Key>): PreparedPath<Key> {
-  const name = "preparePath";
-  const air = checkPathInput(input, name);
-  const keys = Object.keys(constituentsOf(input, name)) as Key[];
-  const columns = checkedColumns(air, keys, name);
-  const refraction = (zenithDeg: number): number =>
-    traceRay(air, zenithDeg, name)[0]! * DEGREES_PER_RADIAN;
-  const horizonApparentZenithDeg = apparentHorizonDeg(air);
-  const rising = fitRising(air, columns, name);
-  const apparent = {
-    altitudeM: input.altitudeM,
-    wavelengthNm: input.wavelengthNm,
-    earthRadiusM: input.earthRadiusM,
-    keys,
-    horizonApparentZenithDeg,
-    horizonTrueZenithDeg: horizonApparentZenithDeg + refraction(horizonApparentZenithDeg),
-    levelRefractionDeg: refraction(90),
-    rising,
-    risingTrue: rising,
-    dipping: fitDipping(air, columns, name),
-  };
-  return { ...apparent, risingTrue: fitRisingTrue(apparent) };
+  const air = checkPathInput(input, "preparePath");
+  const keys = Object.keys(constituentsOf(input, "preparePath")) as Key[];
+  return fitPath(air, keys, "preparePath");
 }
