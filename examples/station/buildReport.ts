@@ -99,9 +99,8 @@ h1{font-size:1.6em;line-height:1.2}h2{font-size:1.2em;margin:2em 0 .5em}
 .about{border-left:4px solid var(--warnedge);padding:.2em 0 .2em 1em;font-weight:bold}
 .caution{background:var(--warn);border:1px solid var(--warnedge);border-radius:6px;padding:.2em 1.2em}.caution h2{margin:.6em 0 0}
 ul{padding-left:1.2em}li{margin:.4em 0}dt{font-weight:bold;margin-top:.8em}dd{margin:0}
-.table{overflow-x:auto;margin:1em 0}
+.caption{color:var(--faint);font-size:.85em;margin:1.2em 0 .4em}.table{overflow-x:auto;margin:0 0 1em}
 table{border-collapse:collapse;font-size:.85em;font-variant-numeric:tabular-nums;width:100%}
-caption{text-align:left;color:var(--faint);padding-bottom:.4em}
 th,td{text-align:right;padding:.3em .6em;border-bottom:1px solid var(--edge);white-space:nowrap}
 th{font-weight:bold;vertical-align:top;white-space:normal}th small{display:block;font-weight:normal;color:var(--faint)}
 .patch{display:inline-block;width:1.4em;height:1em;margin-right:.5em;vertical-align:-.12em;border:1px solid var(--edge)}

@@ -19,8 +19,8 @@ export function draw(width: PictureWidth, label: string, options: PlotOptions): 
       overflow: "visible",
     },
   });
-  return drawing.outerHTML
-    .replace(/<style>[^]*?<\/style>/, "") // the plot's own style sheet: pages around it have theirs
+  return String(drawing.outerHTML)
+    .replace(/<style>[\s\S]*?<\/style>/, "") // the plot's own style sheet: pages around it have theirs
     .replace(/\d+\.\d{3,}/g, (digits) => Number(digits).toFixed(2)); // a hundredth of a pixel is enough
 }
 

@@ -26,7 +26,8 @@ export function tableAsHtml({ title, columns, rows }: Table): string {
       `<th scope="col">${escapeHtml(heading)}<small>${escapeHtml(unit)}</small></th>`,
   );
   const body = rows.map((row) => `<tr>${row.map(cellAsHtml).join("")}</tr>`);
-  return `<div class="table"><table><caption>${escapeHtml(title)}</caption><thead><tr>${head.join("")}</tr></thead>
+  return `<p class="caption">${escapeHtml(title)}</p>
+<div class="table"><table aria-label="${escapeHtml(title)}"><thead><tr>${head.join("")}</tr></thead>
 <tbody>
 ${body.join("\n")}
 </tbody></table></div>`;
