@@ -22,12 +22,5 @@ export default {
   githubPages: false,
   treatWarningsAsErrors: true,
   validation: { notExported: true, invalidLink: true, notDocumented: true, rewrittenLink: true },
-  requiredToBeDocumented: [
-    "Module",
-    "Variable",
-    "Function",
-    "Interface",
-    "Property",
-    "TypeAlias",
-  ],
+  requiredToBeDocumented: ["Variable", "Function", "Interface", "Property", "TypeAlias"],
 };

@@ -33,7 +33,7 @@ export function checkRising(
   }
 }
 
-/** Throws unless the spectrum reaches from `fromNm` to `toNm`. */
+/** Throws unless the spectrum, looked at already, reaches from `fromNm` to `toNm`. */
 export function checkCover(
   spectrum: Spectrum,
   fromNm: number,
@@ -42,7 +42,8 @@ export function checkCover(
   functionName: string,
 ): void {
   const { wavelengthsNm } = spectrum;
-  const [first, last] = [wavelengthsNm[0]!, wavelengthsNm[wavelengthsNm.length - 1]!];
+  const first = wavelengthsNm[0]!;
+  const last = wavelengthsNm[wavelengthsNm.length - 1]!;
   if (first <= fromNm && last >= toNm) return;
   throw new RangeError(
     `${functionName}: ${argument} must cover ${fromNm} to ${toNm} nm, got ${first} to ${last} nm`,
