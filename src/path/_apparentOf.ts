@@ -8,7 +8,7 @@ import { apparentHorizonDeg, traceRay } from "./_traceRay.js";
 /** Wider than any refraction that lets a ray through, degrees. */
 const WIDEST_DEG = 10;
 /** Rounding of an angle near 90 degrees. */
-const TOLERANCE_DEG = 5e-14;
+const TOLERANCE_DEG = 2e-13;
 
 export function apparentOf(air: RayAir, trueZenithDeg: number, name: string): number {
   const refraction = (z: number): number => traceRay(air, z, name)[0]! * DEGREES_PER_RADIAN;

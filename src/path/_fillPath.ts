@@ -1,8 +1,8 @@
 /** Bulk evaluation of a prepared path over typed arrays. */
 import { checkNumber } from "../_check.js";
 import { massAt, massAtTrue, refractionAt, refractionAtTrue } from "./_atElevation.js";
-import { atPiece } from "./_pieces.js";
 import { risingPlace, risingReach } from "./_pathVariable.js";
+import { atPiece } from "./_pieces.js";
 import type { PathFit, PreparedPath } from "./preparedPath.js";
 
 /** Fills `out` with a quantity at apparent zenith angles; NaN stays NaN, an angle out of range throws and names its place. */
@@ -11,21 +11,13 @@ export function fillApparent(
   zenithsDeg: ArrayLike<number>,
   quantity: number,
   out: Float64Array,
-  functionName: string,
+  name: string,
 ): Float64Array {
-  const most = path.horizonApparentZenithDeg;
   if (quantity > 0 && fillRising(path.rising, zenithsDeg, quantity, 0, out)) return out;
-  for (let i = 0; i < zenithsDeg.length; i++) {
-    const zenith = zenithsDeg[i]!;
-    if (quantity > 0 && zenith >= 0 && zenith <= 90) continue;
-    if (Number.isNaN(zenith)) {
-      out[i] = zenith;
-      continue;
-    }
-    checkNumber(zenith, 0, most, "degrees", `apparentZenithsDeg[${i}]`, functionName);
-    out[i] = quantity === 0 ? refractionAt(path, 90 - zenith) : massAt(path, 90 - zenith, quantity);
-  }
-  return out;
+  const most = path.horizonApparentZenithDeg;
+  return fillEach(zenithsDeg, most, out, "apparentZenithsDeg", name, (elevation) =>
+    quantity === 0 ? refractionAt(path, elevation) : massAt(path, elevation, quantity),
+  );
 }
 
 /** The same at true zenith angles. */
@@ -34,23 +26,28 @@ export function fillTrue(
   zenithsDeg: ArrayLike<number>,
   quantity: number,
   out: Float64Array,
-  functionName: string,
+  name: string,
 ): Float64Array {
-  const most = path.horizonTrueZenithDeg;
   const level = path.levelRefractionDeg;
   if (quantity > 0 && fillRising(path.risingTrue, zenithsDeg, quantity, level, out)) return out;
+  const most = path.horizonTrueZenithDeg;
+  return fillEach(zenithsDeg, most, out, "trueZenithsDeg", name, (elevation) =>
+    quantity === 0 ? refractionAtTrue(path, elevation) : massAtTrue(path, elevation, quantity),
+  );
+}
+
+function fillEach(
+  zenithsDeg: ArrayLike<number>,
+  most: number,
+  out: Float64Array,
+  argument: string,
+  name: string,
+  valueAt: (elevationDeg: number) => number,
+): Float64Array {
   for (let i = 0; i < zenithsDeg.length; i++) {
     const zenith = zenithsDeg[i]!;
-    if (quantity > 0 && zenith >= 0 && zenith <= 90 + level) continue;
-    if (Number.isNaN(zenith)) {
-      out[i] = zenith;
-      continue;
-    }
-    checkNumber(zenith, 0, most, "degrees", `trueZenithsDeg[${i}]`, functionName);
-    out[i] =
-      quantity === 0
-        ? refractionAtTrue(path, 90 - zenith)
-        : massAtTrue(path, 90 - zenith, quantity);
+    if (!Number.isNaN(zenith)) checkNumber(zenith, 0, most, "degrees", `${argument}[${i}]`, name);
+    out[i] = Number.isNaN(zenith) ? zenith : valueAt(90 - zenith);
   }
   return out;
 }
@@ -68,7 +65,7 @@ function fillRising(
   const perSquare = 1 / (span * span);
   let all = true;
   for (let i = 0; i < zenithsDeg.length; i++) {
-    const above = span - zenithsDeg[i]!;
+    const above = 90 - zenithsDeg[i]! + levelDeg;
     if (above >= 0 && above <= span) {
       const inverse = 1 / risingReach(above, span, perSquare);
       out[i] = atPiece(table, pieces, risingPlace(inverse, pieces)) * inverse;

@@ -1,6 +1,7 @@
 /** Fits a path in all its angles. */
 import { DEGREES_PER_RADIAN } from "../units.js";
-import { fitDipping, fitRising, fitRisingTrue } from "./_fitAngles.js";
+import { fitDipping, fitRising } from "./_fitAngles.js";
+import { fitRisingTrue } from "./_fitTrueAngles.js";
 import { checkedColumns } from "./_massesOf.js";
 import type { RayAir } from "./_rayAir.js";
 import { apparentHorizonDeg, traceRay } from "./_traceRay.js";

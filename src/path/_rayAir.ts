@@ -1,6 +1,6 @@
 /** What a ray needs to know of the air: refractivity and densities at any height, and the heights where they have kinks. */
-import { layerBreaks, layerDensity } from "../air/_layerDensity.js";
-import { fillState, profileLayer, VAPOUR_LIGHTNESS } from "../air/_profileState.js";
+import { layerBreaks } from "../air/_layerDensity.js";
+import { fillState, profileLayer } from "../air/_profileState.js";
 import {
   type RefractivityFactors,
   refractivity,
@@ -65,23 +65,6 @@ export function refractivityAt(
 ): number {
   fillState(air.profile, layer, heightM, state);
   return refractivity(air.factors, state[0]!, state[1]!, state[2]!);
-}
-
-/** Mass density of moist air in a unit of its own, from a state. */
-export function airDensityIn(state: Float64Array): number {
-  return (state[1]! * (1 - VAPOUR_LIGHTNESS * state[2]!)) / state[0]!;
-}
-
-/** Adds `length` times the density of each constituent at a height to `sums`, from place 2 on. */
-export function addConstituents(
-  { constituents }: RayAir,
-  heightM: number,
-  length: number,
-  sums: Float64Array,
-): void {
-  for (let i = 0; i < constituents.length; i++) {
-    sums[i + 2]! += length * layerDensity(constituents[i]!, heightM);
-  }
 }
 
 function geometricHeight(geopotentialM: number): number {

@@ -14,7 +14,7 @@ export function rootBetween(
   for (let i = 0; i < 200; i++) {
     const x = fa === fb ? a : a - (fa * (b - a)) / (fb - fa);
     const fx = f(x);
-    if (Math.abs(fx) <= tolerance || Math.abs(b - a) <= Number.EPSILON * Math.abs(b)) return x;
+    if (Math.abs(fx) <= tolerance || x === a || x === b) return x;
     if (fx < 0) {
       [a, fa] = [x, fx];
       if (side < 0) fb /= 2;

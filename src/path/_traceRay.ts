@@ -4,7 +4,8 @@ import { atan2, cos, sin, sqrt } from "../_numeric.js";
 import { RADIANS_PER_DEGREE } from "../units.js";
 import { grazingDips, lowestPoint } from "./_lowestPoint.js";
 import { layerAt, type RayAir, refractivityAt } from "./_rayAir.js";
-import { sumAlong, sumLevel } from "./_sumAlong.js";
+import { sumAlong } from "./_sumAlong.js";
+import { sumLevel } from "./_sumLevel.js";
 
 /** Cosine of the smallest dip whose lowest point (0.4 mm down) is worth finding; nearer, the ray is a parabola. */
 const LEAST_DIP = 1e-5;

@@ -10,7 +10,7 @@ import type { PathInput } from "./pathInput.js";
  *
  * Model: root of the true angle along refracted rays, by false position.
  * Validity: true zenith angle from 0 to where the ray would meet the ground, enforced; the rest as `refractedPath`.
- * Accuracy: going through `refractedPath` gives the true angle back to 1e-12 degrees.
+ * Accuracy: going through `refractedPath` gives the angle back to 1e-11 degrees.
  * Source: as `refractedPath`.
  *
  * @param trueZenithDeg - zenith angle outside the air, degrees, from 0

@@ -1,7 +1,8 @@
 /** The prepared path of a moment's weather. */
 import { checkNumber, checkRecord, refuse } from "../_check.js";
 import type { Kelvins, Pascals } from "../units.js";
-import type { DippingFit, PathFit, PreparedPath } from "./preparedPath.js";
+import { blendPaths } from "./_blendPaths.js";
+import type { PreparedPath } from "./preparedPath.js";
 import type { WeatherPaths } from "./prepareWeatherPaths.js";
 
 /**
@@ -10,7 +11,9 @@ import type { WeatherPaths } from "./prepareWeatherPaths.js";
  * Model: every number of the path is interpolated between the grid's nine paths, by parabolas in pressure and in one over
  * temperature.
  * Validity: within the ranges given to `prepareWeatherPaths`, enforced: nothing is extrapolated.
- * Accuracy: against `preparePath` in the same weather, for ranges of 4 kPa and 20 K: @ACC@. Takes a few microseconds.
+ * Accuracy: against `refractedPath` in the same weather, for ranges of 4 kPa and 20 K at sea level: 2e-6 relative in the masses
+ * and 5e-4 arcsec in refraction to 88 degrees, 5e-6 and 0.015 arcsec at 90 degrees; for 8 kPa and 40 K ten times that. Takes
+ * about 0.1 ms.
  * Source: as `refractedPath`; the interpolation is our own.
  *
  * @param weather - `pressurePa` and `temperatureK` at the observer
@@ -35,7 +38,7 @@ import type { WeatherPaths } from "./prepareWeatherPaths.js";
  *   temperatureRangeK: [275, 295],
  * });
  * const noon = pathInWeather({ pressurePa: 101300, temperatureK: 291 }, paths);
- * airMassOnTruePath(85, noon); // => @@
+ * airMassOnTruePath(85, noon); // => 10.04998
  */
 export function pathInWeather<Key extends string>(
   weather: { readonly pressurePa: Pascals; readonly temperatureK: Kelvins },
@@ -54,7 +57,7 @@ export function pathInWeather<Key extends string>(
   const inverses = temperaturesK.map((t) => 1 / t);
   const byTemperature = parabolaWeights(inverses, 1 / temperatureK);
   const weights = byPressure.flatMap((p) => byTemperature.map((t) => p * t));
-  return blend(paths.paths, weights);
+  return blendPaths(paths.paths, weights);
 }
 
 /** Lagrange's weights of three points. */
@@ -65,48 +68,4 @@ function parabolaWeights(points: readonly number[], x: number): number[] {
     ((x - a) * (x - c)) / ((b - a) * (b - c)),
     ((x - a) * (x - b)) / ((c - a) * (c - b)),
   ];
-}
-
-function blend<Key extends string>(
-  paths: readonly PreparedPath<Key>[],
-  weights: readonly number[],
-): PreparedPath<Key> {
-  const mix = (of: (path: PreparedPath<Key>) => number): number =>
-    weights.reduce((sum, weight, i) => sum + weight * of(paths[i]!), 0);
-  const mixFit = (of: (path: PreparedPath<Key>) => PathFit): PathFit => ({
-    pieces: of(paths[0]!).pieces,
-    coefficients: mixTables(
-      paths.map((path) => of(path).coefficients),
-      weights,
-    ),
-  });
-  return {
-    ...paths[0]!,
-    horizonApparentZenithDeg: 90 + mix((path) => path.horizonApparentZenithDeg - 90),
-    horizonTrueZenithDeg: mix((path) => path.horizonTrueZenithDeg),
-    levelRefractionDeg: mix((path) => path.levelRefractionDeg),
-    rising: mixFit((path) => path.rising),
-    risingTrue: mixFit((path) => path.risingTrue),
-    dipping: paths[0]!.dipping.map(
-      (_, i): DippingFit => ({
-        ...mixFit((path) => path.dipping[i]!),
-        topDeg: mix((path) => path.dipping[i]!.topDeg),
-        bottomDeg: mix((path) => path.dipping[i]!.bottomDeg),
-      }),
-    ),
-  };
-}
-
-function mixTables(
-  tables: readonly (readonly Float64Array[])[],
-  weights: readonly number[],
-): Float64Array[] {
-  return tables[0]!.map((first, q) => {
-    const mixed = new Float64Array(first.length);
-    for (const [i, weight] of weights.entries()) {
-      const table = tables[i]![q]!;
-      for (let k = 0; k < mixed.length; k++) mixed[k]! += weight * table[k]!;
-    }
-    return mixed;
-  });
 }

@@ -55,7 +55,7 @@ export interface WeatherPaths<Key extends string = never> {
  *   temperatureRangeK: [275, 295],
  * });
  * const morning = pathInWeather({ pressurePa: 101800, temperatureK: 278.4 }, paths);
- * refractionOnPath(80, morning) * 3600; // => @@
+ * refractionOnPath(80, morning) * 3600; // => 325.8606
  */
 export function prepareWeatherPaths<Key extends string = never>(
   input: WeatherPathInput<Key>,

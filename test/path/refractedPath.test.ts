@@ -356,7 +356,8 @@ describe("properties", () => {
       fc.property(anywhere, between(0, 91), (where, zenith) => {
         const given = { ...inputOf(where), altitudeM: 4000 };
         const { trueZenithDeg } = refractedPath(zenith, given);
-        expectAbsolute(apparentZenith(trueZenithDeg, given), zenith, 1e-12);
+        // rounding of the angles 1e-14, of a grazing ray's lowest point a hundred times that
+        expectAbsolute(apparentZenith(trueZenithDeg, given), zenith, 1e-11);
       }),
       { numRuns: 40 },
     );
