@@ -1,6 +1,7 @@
 /** Evaluation of a prepared path, unguarded. */
 import { atPiece } from "./_pieces.js";
-import { dippingPlace, nearSine, risingPlace, risingReach } from "./_pathVariable.js";
+import { dippingPlace } from "./_dippingPlace.js";
+import { nearSine, risingPlace, risingReach } from "./_risingPlace.js";
 import { rootBetween } from "./_rootBetween.js";
 import type { PreparedPath } from "./preparedPath.js";
 

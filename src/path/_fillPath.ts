@@ -1,9 +1,8 @@
 /** Bulk evaluation of a prepared path over typed arrays. */
 import { checkNumber } from "../_check.js";
 import { massAt, massAtTrue, refractionAt, refractionAtTrue } from "./_atElevation.js";
-import { risingPlace, risingReach } from "./_pathVariable.js";
-import { atPiece } from "./_pieces.js";
-import type { PathFit, PreparedPath } from "./preparedPath.js";
+import { fillRising } from "./_risingPlace.js";
+import type { PreparedPath } from "./preparedPath.js";
 
 /** Fills `out` with a quantity at apparent zenith angles; NaN stays NaN, an angle out of range throws and names its place. */
 export function fillApparent(
@@ -50,26 +49,4 @@ function fillEach(
     out[i] = Number.isNaN(zenith) ? zenith : valueAt(90 - zenith);
   }
   return out;
-}
-
-/** The hot loop: masses of the rays that rise. True if that is all of them. */
-function fillRising(
-  { pieces, coefficients }: PathFit,
-  zenithsDeg: ArrayLike<number>,
-  quantity: number,
-  levelDeg: number,
-  out: Float64Array,
-): boolean {
-  const table = coefficients[quantity]!;
-  const span = 90 + levelDeg;
-  const perSquare = 1 / (span * span);
-  let all = true;
-  for (let i = 0; i < zenithsDeg.length; i++) {
-    const above = 90 - zenithsDeg[i]! + levelDeg;
-    if (above >= 0 && above <= span) {
-      const inverse = 1 / risingReach(above, span, perSquare);
-      out[i] = atPiece(table, pieces, risingPlace(inverse, pieces)) * inverse;
-    } else all = false;
-  }
-  return all;
 }

@@ -2,7 +2,7 @@
 import { apparentElevation, massAt, refractionAt } from "./_atElevation.js";
 import { RISING_TOLERANCE, resolution, scaled } from "./_fitResolution.js";
 import { fitPieces } from "./_fitPieces.js";
-import { nearSine, risingElevation, risingReach } from "./_pathVariable.js";
+import { nearSine, risingElevation, risingReach } from "./_risingPlace.js";
 import type { PathFit, PreparedPath } from "./preparedPath.js";
 
 /** The rising rays again over their true elevations, from the fit over apparent ones. */

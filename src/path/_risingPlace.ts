@@ -1,5 +1,7 @@
-/** The variables in which the fits are polynomials, and the way back. */
+/** The variable in which fits of rising rays are polynomials, the way back, and the loop that needs both to be fast. */
 import { sqrt } from "../_numeric.js";
+import { atPiece } from "./_pieces.js";
+import type { PathFit } from "./preparedPath.js";
 
 // near the sine of the elevation: minimax of sin e / y on y = e (2 S - e) / S², 2.6e-9; being even about the zenith S it
 // costs no trigonometry, and what it lacks of the sine falls out
@@ -33,7 +35,8 @@ export function nearSine(zenithDeg: number, spanDeg: number): number {
 
 /** Place on the pieces, 0 to `pieces`, of one over a reach. */
 export function risingPlace(inverseReach: number, pieces: number): number {
-  return pieces * (1 + BEND - BEND * (1 + BEND) * inverseReach);
+  const scale = pieces * (1 + BEND);
+  return scale - scale * BEND * inverseReach;
 }
 
 /** The elevation at a place on the pieces. */
@@ -48,23 +51,29 @@ export function risingElevation(place: number, spanDeg: number, pieces: number):
   return (spanDeg * y) / (1 + sqrt(Math.max(0, 1 - y)));
 }
 
-/** The same between two dips: the root takes the kink at the upper end away. */
-export function dippingPlace(
-  elevationDeg: number,
-  topDeg: number,
-  bottomDeg: number,
-  pieces: number,
-): number {
-  return pieces * sqrt(Math.max(0, topDeg - elevationDeg) / (topDeg - bottomDeg));
-}
-
-/** The elevation at a place between two dips. */
-export function dippingElevation(
-  place: number,
-  topDeg: number,
-  bottomDeg: number,
-  pieces: number,
-): number {
-  const share = place / pieces;
-  return topDeg - share * share * (topDeg - bottomDeg);
+/**
+ * Masses of the rays among `zenithsDeg` that rise; true if that is all of them. Here because constants of this file read from
+ * another cost half as much again.
+ */
+export function fillRising(
+  { pieces, coefficients }: PathFit,
+  zenithsDeg: ArrayLike<number>,
+  quantity: number,
+  levelDeg: number,
+  out: Float64Array,
+): boolean {
+  const table = coefficients[quantity]!;
+  const span = 90 + levelDeg;
+  const perSquare = 1 / (span * span);
+  const scale = pieces * (1 + BEND);
+  const slope = scale * BEND;
+  let all = true;
+  for (let i = 0; i < zenithsDeg.length; i++) {
+    const above = 90 - zenithsDeg[i]! + levelDeg;
+    if (above >= 0 && above <= span) {
+      const inverse = 1 / risingReach(above, span, perSquare);
+      out[i] = atPiece(table, pieces, scale - slope * inverse) * inverse;
+    } else all = false;
+  }
+  return all;
 }
