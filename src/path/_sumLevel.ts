@@ -3,7 +3,7 @@ import { layerAt, type RayAir, refractivityAt } from "./_rayAir.js";
 import { addConstituents, airDensityIn } from "./_rayDensities.js";
 import { squaredCosineGrowth } from "./_rayPanels.js";
 
-/** Adds to `sums`, as `sumAlong` does, what a ray collects from its lowest point to a height less than a millimetre above it, where the ray's cosine is given. */
+/** Adds to `sums`, as `sumAlong` does, what a ray collects on the last millimetre from its lowest point, up to a given cosine. */
 export function sumLevel(air: RayAir, heightM: number, cosine: number, sums: Float64Array): void {
   const state = new Float64Array(3);
   const radius = air.earthRadiusM + heightM;

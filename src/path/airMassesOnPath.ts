@@ -18,7 +18,8 @@ import type { PreparedPath } from "./preparedPath.js";
  * @param path - prepared path from `preparePath` or `pathInWeather`
  * @param out - array to fill, at least as long; a new one if left out
  * @returns `out`, each value the air mass, without unit
- * @throws TypeError if an argument is of the wrong kind; RangeError if an angle is beyond the horizon (the message names its place) or `out` is short
+ * @throws TypeError if an argument is of the wrong kind; RangeError if an angle is beyond the horizon (the
+ *   message names its place) or `out` is short
  * @example
  * import { airMassesOnPath, preparePath, standardProfile } from "airlight";
  * const profile = standardProfile({

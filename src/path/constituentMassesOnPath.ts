@@ -18,7 +18,8 @@ import type { PreparedPath } from "./preparedPath.js";
  * @param key - the constituent, one of `path.keys`
  * @param out - array to fill, at least as long; a new one if left out
  * @returns `out`, each value the mass of the constituent over its column above the observer, without unit
- * @throws TypeError if an argument is of the wrong kind; RangeError if an angle is beyond the horizon (the message names its place) or `out` is short
+ * @throws TypeError if an argument is of the wrong kind; RangeError if an angle is beyond the horizon (the
+ *   message names its place) or `out` is short
  * @example
  * import { constituentMassesOnPath, gaussianLayer, preparePath, standardProfile } from "airlight";
  * const profile = standardProfile({
