@@ -1,6 +1,6 @@
 /** Runs the tests of one room once per changed literal; the parent ends the process when a change makes a test run forever. */
 import * as vitestExpect from "@vitest/expect";
-import fc from "fast-check";
+import "../_seed.js";
 import { bundleTests, type Register } from "./_bundle.js";
 import type { Nudge } from "./_literals.js";
 
@@ -24,7 +24,6 @@ interface Test {
 
 const { chai, JestAsymmetricMatchers, JestChaiExpect, JestExtend } = vitestExpect;
 for (const plugin of [JestExtend, JestChaiExpect, JestAsymmetricMatchers]) chai.use(plugin);
-fc.configureGlobal({ seed: 20240229 });
 
 /** The tests a bundle registers. */
 function collect(register: Register, changed: number, value: number): Test[] {
