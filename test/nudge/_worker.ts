@@ -9,8 +9,10 @@ export interface Job {
   readonly tests: readonly string[];
   readonly nudges: readonly Nudge[];
 }
-/** To the parent. */
+/** To the parent: first `readySeconds`, then one `noticed` per literal. */
 export interface Report {
+  /** How long the tests took unchanged. */
+  readonly readySeconds?: number;
   /** Position in `changed` of the change a test noticed; -1 if none did. */
   readonly noticed?: number;
   /** Why the tests cannot be used: they do not build, or fail unchanged. */
@@ -97,7 +99,9 @@ const tell = (report: Report): Promise<void> =>
 
 async function work({ tests, nudges }: Job): Promise<void> {
   const register = await bundleTests(tests, nudges);
+  const start = performance.now();
   const order = await byTime(collect(register, -1, 0));
+  await tell({ readySeconds: (performance.now() - start) / 1000 });
   if (order.length === 0) throw new Error("no tests");
   for (const [n, { changed }] of nudges.entries()) {
     let noticed = -1;

@@ -14,7 +14,9 @@ import { EQUIVALENT } from "./_equivalent.js";
 import { type Nudge, nudgesOf } from "./_literals.js";
 import type { Job, Report } from "./_worker.js";
 
-/** A change whose tests take longer is taken for endless, and so for noticed. */
+/** Until a room's tests have passed unchanged. */
+const MOST_SECONDS_BEFORE = 600;
+/** A change whose tests take this long, and fifty times as long as unchanged, is taken for endless, and so for noticed. */
 const MOST_SECONDS = 60;
 
 interface Outcome {
@@ -31,22 +33,27 @@ async function runJob(room: string, { tests, nudges }: Job): Promise<Outcome[]> 
   while (outcomes.length < nudges.length) {
     const worker = fork(`${ROOT}test/nudge/_worker.ts`);
     let timer: NodeJS.Timeout | undefined;
+    let limit = MOST_SECONDS_BEFORE;
+    let broken = "the tests take too long";
     const wind = (): void => {
       clearTimeout(timer);
-      timer = setTimeout(() => worker.kill("SIGKILL"), MOST_SECONDS * 1000);
+      timer = setTimeout(() => worker.kill("SIGKILL"), limit * 1000);
     };
-    let broken: string | undefined;
     worker.on("message", (report: Report) => {
-      wind();
-      broken = report.broken;
       const nudge = nudges[outcomes.length];
+      if (report.readySeconds !== undefined) {
+        broken = "";
+        limit = Math.max(MOST_SECONDS, 50 * report.readySeconds);
+      }
+      if (report.broken !== undefined) broken = report.broken;
       if (report.noticed !== undefined && nudge) outcomes.push({ nudge, noticed: report.noticed });
+      wind();
     });
     wind();
     worker.send({ tests, nudges: nudges.slice(outcomes.length) } satisfies Job);
     const code = await new Promise<number | null>((resolve) => worker.on("close", resolve));
     clearTimeout(timer);
-    if (broken !== undefined) {
+    if (broken !== "") {
       unusable.push(`${room}: ${broken}`);
       return [];
     }
