@@ -21,11 +21,13 @@ export type DispersionInput = Omit<PathInput, "wavelengthNm" | "constituents"> &
     | {
         /** True zenith angle of the source, degrees: its colours are compared in the picture. */
         readonly trueZenithDeg: Degrees;
+        /** Left out: one angle of the two. */
         readonly apparentZenithDeg?: never;
       }
     | {
         /** Apparent zenith angle, degrees: colours that arrive there together are compared on the sky. */
         readonly apparentZenithDeg: Degrees;
+        /** Left out: one angle of the two. */
         readonly trueZenithDeg?: never;
       }
   );

@@ -79,7 +79,7 @@ describe("air mass of air against the ray", () => {
     [
       "airMassPickering",
       airMassPickering,
-      [82, 0.07],
+      [82, 0.08],
       [
         [85, 0.138],
         [88, 1.01],
