@@ -10,3 +10,4 @@ export * from "./path/index.js";
 export * from "./beam/index.js";
 export * from "./colour/index.js";
 export * from "./retrieval/index.js";
+export * from "./uncertainty/index.js";
