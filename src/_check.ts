@@ -77,8 +77,8 @@ function show(value: unknown): string {
 function slip(value: unknown, unit: string, low: number, high: number): string {
   const fits = (converted: number): boolean => converted >= low && converted <= high;
   if (typeof value !== "number") return "";
-  if (unit === "Pa" && fits(value * 100)) return "hPa? multiply by 100";
   if (unit === "Pa" && fits(value * 1000)) return "kPa? multiply by 1000";
+  if (unit === "Pa" && fits(value * 100)) return "hPa? multiply by 100";
   if (unit === "K" && fits(value + 273.15)) return "°C? add 273.15";
   if (unit === "nm" && fits(value * 1000)) return "µm? multiply by 1000";
   if (unit === "m" && fits(value * 1000) && value < low) return "km? multiply by 1000";

@@ -1,1 +1,4 @@
-export {};
+/** What stands above a site: molecules per square metre, optical depths of each constituent. @module column */
+export { type AirColumn, type AirColumnInput, airColumn } from "./airColumn.js";
+export { airColumnBodhaine } from "./airColumnBodhaine.js";
+export { rayleighOpticalDepth } from "./rayleighOpticalDepth.js";
