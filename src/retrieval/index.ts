@@ -1,10 +1,40 @@
 /** Readings back to calibration, optical depths, exponent and turbidity. @module retrieval */
+export type { Budget, BudgetRow } from "../_budget.js";
+export type { Covariance2 } from "./_weightedLine.js";
+export {
+  type AerosolOpticalDepth,
+  aerosolOpticalDepth,
+  type SunReading,
+  type UncertainTerm,
+} from "./aerosolOpticalDepth.js";
+export { airMassPerDegree } from "./airMassPerDegree.js";
+export { type AngstromCurvature, angstromCurvature } from "./angstromCurvature.js";
 export { type AngstromResult, angstromFit } from "./angstromFit.js";
+export { calibrationAt, type UncertainConstant } from "./calibrationAt.js";
+export {
+  type CalibrationDrift,
+  calibrationDrift,
+  type DatedCalibration,
+} from "./calibrationDrift.js";
+export { cloudScreening, SCREENING_REASONS } from "./cloudScreening.js";
+export {
+  type CombinedCalibration,
+  combinedCalibration,
+  type MorningCalibration,
+} from "./combinedCalibration.js";
 export {
   type LangleyInput,
   type LangleyResult,
   langleyFit,
   type RejectedReading,
 } from "./langleyFit.js";
+export { opticalDepthCovariance } from "./opticalDepthCovariance.js";
+export { opticalDepthCriterion } from "./opticalDepthCriterion.js";
+export { type KnownColumn, reducedSignals, type SignalReduction } from "./reducedSignals.js";
 export { type KnownTerm, residualOpticalDepth, type SlantPath } from "./residualOpticalDepth.js";
-export type { Covariance2 } from "./_weightedLine.js";
+export {
+  type CalibrationTransfer,
+  type TransferredCalibration,
+  transferredCalibration,
+} from "./transferredCalibration.js";
+export { type SightUncertainty, zenithStandardUncertainty } from "./zenithStandardUncertainty.js";

@@ -1,6 +1,7 @@
 /** When enough trials have been made (GUM Supplement 1, 7.9). */
+import { moments } from "../_moments.js";
 import { pow, sqrt } from "../_numeric.js";
-import { moments, type Summary } from "./_summary.js";
+import type { Summary } from "./_summary.js";
 
 /** Trials in a block: 10 000, or 100 / (1 - coverage) where that is more. */
 export function blockSize(coverage: number): number {

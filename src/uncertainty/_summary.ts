@@ -1,5 +1,5 @@
 /** Mean, standard deviation and coverage intervals of trials. */
-import { sqrt } from "../_numeric.js";
+import { moments } from "../_moments.js";
 
 /** What a set of trials says of the result. */
 export interface Summary {
@@ -25,18 +25,4 @@ export function summarise(trials: Float64Array, coverage: number): Summary {
   }
   const ends = (from: number): [number, number] => [trials[from]!, trials[from + inside]!];
   return { mean, standardDeviation, interval: ends(first), shortestInterval: ends(shortest) };
-}
-
-/** Mean and standard deviation (n - 1), by sums of deviations from the first value. */
-export function moments(values: ArrayLike<number>): { mean: number; standardDeviation: number } {
-  const origin = values[0]!;
-  let [sum, squares] = [0, 0];
-  for (let i = 0; i < values.length; i++) {
-    const step = values[i]! - origin;
-    sum += step;
-    squares += step * step;
-  }
-  const mean = sum / values.length;
-  const variance = (squares - sum * mean) / (values.length - 1);
-  return { mean: origin + mean, standardDeviation: sqrt(Math.max(0, variance)) };
 }

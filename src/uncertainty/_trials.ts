@@ -1,10 +1,10 @@
 /** Running a model many times. */
 import type { BudgetRow } from "../_budget.js";
 import { refuse } from "../_check.js";
+import { moments } from "../_moments.js";
 import type { Draws } from "./_draws.js";
 import type { Model, UncertainInput } from "./_inputs.js";
 import type { RandomSource } from "./seededRandom.js";
-import { moments } from "./_summary.js";
 
 /** The model's values at `count` draws; `draw` fills the record before each. */
 export function runTrials<Name extends string>(
