@@ -10,6 +10,7 @@ export {
 export { airMassPerDegree } from "./airMassPerDegree.js";
 export { type AngstromCurvature, angstromCurvature } from "./angstromCurvature.js";
 export { type AngstromResult, angstromFit } from "./angstromFit.js";
+export { bandTransmittance } from "./bandTransmittance.js";
 export { calibrationAt, type UncertainConstant } from "./calibrationAt.js";
 export {
   type CalibrationDrift,
@@ -30,6 +31,12 @@ export {
 } from "./langleyFit.js";
 export { opticalDepthCovariance } from "./opticalDepthCovariance.js";
 export { opticalDepthCriterion } from "./opticalDepthCriterion.js";
+export { type OzoneChannel, type OzoneColumn, type OzonePath, ozoneColumn } from "./ozoneColumn.js";
+export {
+  type PrecipitableWater,
+  precipitableWater,
+  type WaterReading,
+} from "./precipitableWater.js";
 export { type KnownColumn, reducedSignals, type SignalReduction } from "./reducedSignals.js";
 export { type KnownTerm, residualOpticalDepth, type SlantPath } from "./residualOpticalDepth.js";
 export {

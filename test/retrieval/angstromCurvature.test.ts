@@ -136,7 +136,7 @@ describe("edges", () => {
   });
   it("refuses what cannot be", () => {
     const covariance = diagonal(NM.map(() => 1e-6));
-    const fit =
+    const curved =
       (change: object): (() => unknown) =>
       () =>
         angstromCurvature(NM, depths, { covariance, referenceNm: 500, ...change } as never);
@@ -144,7 +144,11 @@ describe("edges", () => {
     expectRefusal(curved({ covariance: [1, 2, 3] }), RangeError, "at least 9");
     expectRefusal(curved({ covariance: new Float64Array(9) }), RangeError, "36 values");
     expectRefusal(curved({ covariance: undefined }), TypeError, "covariance");
-    expectRefusal(curved({ covariance: covariance.map(() => 1e-6) }), RangeError, "positive definite");
+    expectRefusal(
+      curved({ covariance: covariance.map(() => 1e-6) }),
+      RangeError,
+      "positive definite",
+    );
     expectRefusal(
       () => angstromCurvature(NM, depths, undefined as never),
       TypeError,
