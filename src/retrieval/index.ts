@@ -24,13 +24,28 @@ export {
   type MorningCalibration,
 } from "./combinedCalibration.js";
 export {
+  type BandExtinction,
+  type Coefficient,
+  type ExtinctionTerms,
+  extinctionFit,
+  type StarObservation,
+} from "./extinctionFit.js";
+export {
   type LangleyInput,
   type LangleyResult,
   langleyFit,
   type RejectedReading,
 } from "./langleyFit.js";
+export { magnitudeToOpticalDepth } from "./magnitudeToOpticalDepth.js";
+export {
+  type ExtinctionModel,
+  type ModelStar,
+  modelExtinction,
+  type PredictedExtinction,
+} from "./modelExtinction.js";
 export { opticalDepthCovariance } from "./opticalDepthCovariance.js";
 export { opticalDepthCriterion } from "./opticalDepthCriterion.js";
+export { opticalDepthToMagnitude } from "./opticalDepthToMagnitude.js";
 export { type OzoneChannel, type OzoneColumn, type OzonePath, ozoneColumn } from "./ozoneColumn.js";
 export {
   type PrecipitableWater,
