@@ -1,9 +1,8 @@
 /** The checks of `ozoneColumn`. */
 import { checkList, checkNumber, checkRecord } from "../_check.js";
+import { checkPositive, checkUncertainty } from "./_checkPositive.js";
 import { checkAirMass } from "./_checkAirMass.js";
 import type { OzoneChannel, OzonePath } from "./ozoneColumn.js";
-
-const [LEAST, MOST] = [Number.MIN_VALUE, Number.MAX_VALUE];
 
 /** Throws unless channels and path are sound and there are more channels than aerosol powers. */
 export function checkOzone(channels: readonly OzoneChannel[], path: OzonePath, name: string): void {
@@ -30,15 +29,15 @@ export function checkOzone(channels: readonly OzoneChannel[], path: OzonePath, n
 
 function checkChannel(channel: OzoneChannel, at: string, name: string): void {
   checkNumber(channel.wavelengthNm, 200, 4000, "nm", `${at}.wavelengthNm`, name);
-  checkNumber(channel.signal, LEAST, MOST, "", `${at}.signal`, name);
-  checkNumber(channel.constant, LEAST, MOST, "", `${at}.constant`, name);
+  checkPositive(channel.signal, `${at}.signal`, name);
+  checkPositive(channel.constant, `${at}.constant`, name);
   const [signal, constant] = [
     channel.signalStandardUncertainty,
     channel.constantStandardUncertainty,
   ];
-  checkNumber(signal, 0, MOST, "", `${at}.signalStandardUncertainty`, name);
-  checkNumber(constant, 0, MOST, "", `${at}.constantStandardUncertainty`, name);
-  checkNumber(signal + constant, LEAST, MOST, "", `${at}: one standard uncertainty`, name);
+  checkUncertainty(signal, `${at}.signalStandardUncertainty`, name);
+  checkUncertainty(constant, `${at}.constantStandardUncertainty`, name);
+  checkPositive(signal + constant, `${at}: one standard uncertainty`, name);
   checkNumber(channel.crossSectionM2, 0, 1e-20, "m²", `${at}.crossSectionM2`, name);
   checkNumber(channel.knownSlantDepth, -100, 100, "", `${at}.knownSlantDepth`, name);
 }

@@ -1,24 +1,16 @@
 /** The checks of a direct-sun reading and its known terms. */
 import { checkList, checkNumber, checkRecord, refuse } from "../_check.js";
+import { checkPositive, checkUncertainty } from "./_checkPositive.js";
 import { checkAirMass } from "./_checkAirMass.js";
 import type { SunReading, UncertainTerm } from "./aerosolOpticalDepth.js";
-
-const [LEAST, MOST] = [Number.MIN_VALUE, Number.MAX_VALUE];
 
 /** Throws unless the reading is sound. */
 export function checkReading(reading: SunReading, name: string): void {
   checkRecord(reading, "reading", name);
-  checkNumber(reading.signal, LEAST, MOST, "", "signal", name);
-  checkNumber(reading.signalStandardUncertainty, 0, MOST, "", "signalStandardUncertainty", name);
-  checkNumber(reading.constant, LEAST, MOST, "", "constant", name);
-  checkNumber(
-    reading.constantStandardUncertainty,
-    0,
-    MOST,
-    "",
-    "constantStandardUncertainty",
-    name,
-  );
+  checkPositive(reading.signal, "signal", name);
+  checkUncertainty(reading.signalStandardUncertainty, "signalStandardUncertainty", name);
+  checkPositive(reading.constant, "constant", name);
+  checkUncertainty(reading.constantStandardUncertainty, "constantStandardUncertainty", name);
   const { constantDegreesOfFreedom = 1 } = reading;
   checkNumber(constantDegreesOfFreedom, 1, Infinity, "", "constantDegreesOfFreedom", name);
   checkNumber(reading.sunDistanceAu, 0.9, 1.1, "au", "sunDistanceAu", name);

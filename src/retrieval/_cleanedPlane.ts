@@ -32,15 +32,7 @@ export function cleanedPlane(
   limit: number,
 ): CleanedPlane | undefined {
   const roots = weights.map(sqrt);
-  let fit = leastSquares(columns, data, weights);
-  for (let round = 0; fit !== undefined && round < ABSOLUTE_ROUNDS; round++) {
-    const { residuals } = fit;
-    fit = leastSquares(
-      columns,
-      data,
-      roots.map((root, i) => root / Math.max(SMALL, Math.abs(residuals[i]!))),
-    );
-  }
+  let fit = leastAbsolute(columns, data, roots);
   let kept = Array.from(data.keys());
   for (let round = 0; fit !== undefined; round++) {
     const { unknowns } = fit;
@@ -62,4 +54,23 @@ export function cleanedPlane(
     if (fit !== undefined && (settled || round === MOST_ROUNDS)) return { fit, kept, scores };
   }
   return undefined;
+}
+
+/** Fit of least absolute deviations: each round weights a point by its weight's root over its last distance. */
+function leastAbsolute(
+  columns: readonly Float64Array[],
+  data: Float64Array,
+  roots: Float64Array,
+): LinearFit | undefined {
+  let fit = leastSquares(
+    columns,
+    data,
+    roots.map((root) => root * root),
+  );
+  for (let round = 0; fit !== undefined && round < ABSOLUTE_ROUNDS; round++) {
+    const { residuals } = fit;
+    const reweighted = roots.map((root, i) => root / Math.max(SMALL, Math.abs(residuals[i]!)));
+    fit = leastSquares(columns, data, reweighted);
+  }
+  return fit;
 }

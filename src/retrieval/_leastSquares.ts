@@ -1,5 +1,6 @@
 /** Weighted least squares for a handful of unknowns. */
 import { sqrt } from "../_numeric.js";
+import { dot, invertUpper, timesTranspose } from "./_smallMatrices.js";
 
 /** What a fit gives. */
 export interface LinearFit {
@@ -55,37 +56,4 @@ function remove(q: Float64Array, vector: Float64Array): number {
   const along = dot(q, vector);
   for (let i = 0; i < q.length; i++) vector[i]! -= along * q[i]!;
   return along;
-}
-
-/** Sum of products. */
-export function dot(a: Float64Array, b: Float64Array): number {
-  let sum = 0;
-  for (let i = 0; i < a.length; i++) sum += a[i]! * b[i]!;
-  return sum;
-}
-
-function invertUpper(upper: Float64Array, n: number): Float64Array {
-  const inverse = new Float64Array(n * n);
-  for (let j = 0; j < n; j++) {
-    inverse[j * n + j] = 1 / upper[j * n + j]!;
-    for (let i = j - 1; i >= 0; i--) {
-      let sum = 0;
-      for (let k = i + 1; k <= j; k++) sum += upper[i * n + k]! * inverse[k * n + j]!;
-      inverse[i * n + j] = -sum / upper[i * n + i]!;
-    }
-  }
-  return inverse;
-}
-
-function timesTranspose(matrix: Float64Array, n: number): Float64Array {
-  const product = new Float64Array(n * n);
-  for (let i = 0; i < n; i++) {
-    for (let j = 0; j < n; j++) {
-      product[i * n + j] = dot(
-        matrix.subarray(i * n, i * n + n),
-        matrix.subarray(j * n, j * n + n),
-      );
-    }
-  }
-  return product;
 }

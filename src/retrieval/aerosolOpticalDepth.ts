@@ -1,5 +1,6 @@
 /** Aerosol optical depth of one reading, with its budget. */
-import { type Budget, independentBudget } from "../_budget.js";
+import { independentBudget } from "../_budget.js";
+import type { Budget } from "../budget.js";
 import { studentQuantile } from "../_studentQuantile.js";
 import { log } from "../_numeric.js";
 import type { AstronomicalUnits, Degrees, Dimensionless } from "../units.js";

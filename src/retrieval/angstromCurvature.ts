@@ -1,12 +1,11 @@
 /** Ångström's exponent with its curvature, errors from those of the optical depths. */
-import { checkList, checkNumber, refuse } from "../_check.js";
+import { checkNumber } from "../_check.js";
 import { exp, log, sqrt } from "../_numeric.js";
 import type { Dimensionless, Nanometres } from "../units.js";
+import { checkDepths } from "./_checkDepths.js";
 import { correlatedLeastSquares } from "./_correlatedLeastSquares.js";
 
 const NAME = "angstromCurvature";
-/** Relative standard uncertainty of an optical depth above which its logarithm has no usable error. */
-const MOST_RELATIVE = 0.25;
 
 /** What `angstromCurvature` returns. */
 export interface AngstromCurvature {
@@ -86,29 +85,4 @@ export function angstromCurvature(
     covariance: fit.covariance,
     chiSquare: fit.chiSquare,
   };
-}
-
-function checkDepths(
-  wavelengthsNm: ArrayLike<number>,
-  opticalDepths: ArrayLike<number>,
-  covariance: ArrayLike<number>,
-): void {
-  checkList(wavelengthsNm, 3, "wavelengthsNm", NAME);
-  checkList(opticalDepths, 3, "opticalDepths", NAME);
-  checkList(covariance, 9, "covariance", NAME);
-  const count = wavelengthsNm.length;
-  if (opticalDepths.length !== count || covariance.length !== count * count) {
-    const got = `${opticalDepths.length} and ${covariance.length}`;
-    throw new RangeError(
-      `${NAME}: opticalDepths and covariance must be of ${count} and ${count * count} values, got ${got}`,
-    );
-  }
-  for (let i = 0; i < count; i++) {
-    checkNumber(wavelengthsNm[i], 200, 4000, "nm", `wavelengthsNm[${i}]`, NAME);
-    const least = sqrt(covariance[i * count + i]!) / MOST_RELATIVE;
-    const depth = opticalDepths[i]!;
-    if (depth > 0 && depth >= least) continue;
-    const range = `above 0 and at least four standard uncertainties, ${least}`;
-    refuse(depth, range, "too little aerosol for an exponent?", `opticalDepths[${i}]`, NAME);
-  }
 }

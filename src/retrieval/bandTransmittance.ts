@@ -1,5 +1,5 @@
 /** What a channel sees of its own light through the air. */
-import { checkNumber } from "../_check.js";
+import { checkPositive } from "./_checkPositive.js";
 import { exp } from "../_numeric.js";
 import { checkCover, checkSpectrum } from "../spectrum/_checkSpectrum.js";
 import { segmentFrom, valueInSegment } from "../spectrum/_valueAt.js";
@@ -57,7 +57,7 @@ export function bandTransmittance(
     add(0.5 * (left + right), 4 * (right - left));
     add(right, right - left);
   }
-  checkNumber(outside, Number.MIN_VALUE, Number.MAX_VALUE, "", "light within the passband", NAME);
+  checkPositive(outside, "light within the passband", NAME);
   return through / outside;
 }
 

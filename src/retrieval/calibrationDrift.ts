@@ -1,8 +1,8 @@
 /** How a calibration constant changes with time. */
-import { checkList, checkNumber, checkRecord } from "../_check.js";
+import { checkCalibrations } from "./_checkCalibrations.js";
 import { exp, log, sqrt } from "../_numeric.js";
 import type { Dimensionless } from "../units.js";
-import { randomEffectsFit } from "./_randomEffects.js";
+import { type RandomEffectsFit, randomEffectsFit } from "./_randomEffects.js";
 import type { Covariance2 } from "./_weightedLine.js";
 
 const NAME = "calibrationDrift";
@@ -62,20 +62,13 @@ export interface CalibrationDrift {
 export function calibrationDrift(calibrations: readonly DatedCalibration[]): CalibrationDrift {
   checkCalibrations(calibrations);
   const times = Float64Array.from(calibrations, ({ timeDays }) => timeDays);
-  const data = Float64Array.from(calibrations, ({ constant }) => log(constant));
-  const variances = Float64Array.from(calibrations, (c) => {
-    const relative = c.standardUncertainty / c.constant;
-    return relative * relative;
-  });
   const [firstDays, lastDays] = [Math.min(...times), Math.max(...times)];
   if (!(lastDays > firstDays)) {
     throw new RangeError(
       `${NAME}: calibrations must be of different dates, got ${firstDays} throughout`,
     );
   }
-  const ones = new Float64Array(times.length).fill(1);
-  const since = times.map((time) => time - firstDays);
-  const fit = randomEffectsFit([ones, since], data, variances)!;
+  const fit = lineThrough(calibrations, times, firstDays);
   const [variance0, shared, , variance1] = fit.covariance as unknown as [
     number,
     number,
@@ -99,21 +92,16 @@ export function calibrationDrift(calibrations: readonly DatedCalibration[]): Cal
   };
 }
 
-function checkCalibrations(given: unknown): asserts given is readonly DatedCalibration[] {
-  checkList(given, 3, "calibrations", NAME);
-  (given as unknown as readonly DatedCalibration[]).forEach((calibration, i) => {
-    checkRecord(calibration, `calibrations[${i}]`, NAME);
-    const { timeDays, constant, standardUncertainty } = calibration;
-    const [least, most] = [Number.MIN_VALUE, Number.MAX_VALUE];
-    checkNumber(timeDays, -1e9, 1e9, "days", `calibrations[${i}].timeDays`, NAME);
-    checkNumber(constant, least, most, "", `calibrations[${i}].constant`, NAME);
-    checkNumber(
-      standardUncertainty,
-      least,
-      most,
-      "",
-      `calibrations[${i}].standardUncertainty`,
-      NAME,
-    );
+function lineThrough(
+  calibrations: readonly DatedCalibration[],
+  times: Float64Array,
+  firstDays: number,
+): RandomEffectsFit {
+  const data = Float64Array.from(calibrations, ({ constant }) => log(constant));
+  const variances = Float64Array.from(calibrations, (c) => {
+    const relative = c.standardUncertainty / c.constant;
+    return relative * relative;
   });
+  const ones = new Float64Array(times.length).fill(1);
+  return randomEffectsFit([ones, times.map((time) => time - firstDays)], data, variances)!;
 }

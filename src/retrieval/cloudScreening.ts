@@ -2,21 +2,10 @@
 import { checkList, checkNumber } from "../_check.js";
 import { moments } from "../_moments.js";
 import type { Dimensionless } from "../units.js";
+import { markLonely, markTriplets } from "./_screeningRules.js";
 
 const NAME = "cloudScreening";
 
-/** Why a reading was left out: its code in the result of `cloudScreening`. */
-export const SCREENING_REASONS: readonly string[] = [
-  "kept",
-  "not a number or below -0.01",
-  "varies within three readings",
-  "alone between cloudy readings",
-  "beyond three standard deviations of the day",
-];
-
-const SPREAD = 0.02;
-const RELATIVE_SPREAD = 0.03;
-const LEAST_NEIGHBOURS = 2;
 const LEAST_STABLE = 0.015;
 
 /**
@@ -36,7 +25,7 @@ const LEAST_STABLE = 0.015;
  * @param timesMinutes - times of the readings, minutes on any scale, rising
  * @param opticalDepths - aerosol optical depth at each, one channel (500 nm or near it)
  * @param windowMinutes - time within which readings belong together, 0.1 to 120 minutes (about four times their interval)
- * @returns a code for each reading: 0 kept, 1 to 4 the rule that left it out (`SCREENING_REASONS`)
+ * @returns a code for each reading: 0 kept, 1 to 4 the rule that left it out (`screeningReasons`)
  * @throws TypeError if an argument is of the wrong kind; RangeError if lengths differ, times do not rise or the window is
  *   out of range
  * @example
@@ -76,39 +65,5 @@ function checkTimes(timesMinutes: ArrayLike<number>, count: number): void {
     throw new RangeError(
       `${NAME}: timesMinutes[${i}] must be after the one before it, got ${timesMinutes[i]}`,
     );
-  }
-}
-
-/** Rule 2, over the last two usable readings and each new one. */
-function markTriplets(
-  codes: Uint8Array,
-  times: ArrayLike<number>,
-  depths: ArrayLike<number>,
-  window: number,
-): void {
-  let [first, second] = [-1, -1];
-  for (let i = 0; i < codes.length; i++) {
-    if (codes[i] === 1) continue;
-    if (first >= 0 && times[i]! - times[first]! <= window) {
-      const [a, b, c] = [depths[first]!, depths[second]!, depths[i]!];
-      const least = Math.min(a, b, c);
-      if (Math.max(a, b, c) - least > Math.max(SPREAD, RELATIVE_SPREAD * least)) {
-        codes[first] = 2;
-        codes[second] = 2;
-        codes[i] = 2;
-      }
-    }
-    [first, second] = [second, i];
-  }
-}
-
-/** Rule 3: counts kept readings within the window by two moving ends. */
-function markLonely(codes: Uint8Array, times: ArrayLike<number>, window: number): void {
-  let [from, to, kept] = [0, 0, 0];
-  const good = codes.map((code) => (code === 0 ? 1 : 0));
-  for (let i = 0; i < codes.length; i++) {
-    while (to < codes.length && times[to]! <= times[i]! + window) kept += good[to++]!;
-    while (times[from]! < times[i]! - window) kept -= good[from++]!;
-    if (good[i] === 1 && kept - 1 < LEAST_NEIGHBOURS) codes[i] = 3;
   }
 }

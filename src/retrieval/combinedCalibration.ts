@@ -1,5 +1,6 @@
 /** One calibration constant from several mornings. */
-import { checkList, checkNumber, checkRecord } from "../_check.js";
+import { checkList, checkRecord } from "../_check.js";
+import { checkPositive } from "./_checkPositive.js";
 import { exp, log, sqrt } from "../_numeric.js";
 import { studentQuantile } from "../_studentQuantile.js";
 import type { Dimensionless } from "../units.js";
@@ -90,10 +91,9 @@ function checkMornings(mornings: unknown): asserts mornings is readonly MorningC
   checkList(mornings, 3, "mornings", NAME);
   (mornings as unknown as readonly MorningCalibration[]).forEach((morning, i) => {
     checkRecord(morning, `mornings[${i}]`, NAME);
-    const [least, most] = [Number.MIN_VALUE, Number.MAX_VALUE];
-    checkNumber(morning.constant, least, most, "", `mornings[${i}].constant`, NAME);
+    checkPositive(morning.constant, `mornings[${i}].constant`, NAME);
     const error = `mornings[${i}].constantStandardError`;
-    checkNumber(morning.constantStandardError, least, most, "", error, NAME);
+    checkPositive(morning.constantStandardError, error, NAME);
   });
 }
 

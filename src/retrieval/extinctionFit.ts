@@ -1,8 +1,8 @@
 /** Extinction coefficients from a night of stellar photometry. */
 import { checkRecord } from "../_check.js";
-import { sqrt } from "../_numeric.js";
 import { checkStars } from "./_checkStars.js";
-import { type CleanedPlane, cleanedPlane } from "./_cleanedPlane.js";
+import { bandResult } from "./_bandResult.js";
+import { cleanedPlane } from "./_cleanedPlane.js";
 import type { RejectedReading } from "./langleyFit.js";
 
 const NAME = "extinctionFit";
@@ -108,39 +108,4 @@ export function extinctionFit(
       `${NAME}: observations in ${band} cannot tell the terms apart: add stars of other colours or drop a term`,
     );
   });
-}
-
-function bandResult(
-  band: string,
-  places: readonly number[],
-  weights: Float64Array,
-  terms: ExtinctionTerms,
-  { fit, kept, scores }: CleanedPlane,
-): BandExtinction {
-  const count = fit.unknowns.length;
-  const perDegree = fit.chiSquare / (kept.length - count);
-  const covariance = fit.covariance.map((value) => value * perDegree);
-  const at = (k: number, fitted: boolean): Coefficient =>
-    fitted
-      ? { value: fit.unknowns[k]!, standardUncertainty: sqrt(covariance[k * count + k]!) }
-      : { value: 0, standardUncertainty: 0 };
-  const meanWeight = kept.reduce((sum, i) => sum + weights[i]!, 0) / kept.length;
-  return {
-    band,
-    zeroPoint: at(0, true),
-    extinction: at(1, true),
-    secondOrder: at(2, terms.secondOrder),
-    colourTerm: at(terms.secondOrder ? 3 : 2, terms.colourTerm),
-    covariance,
-    scatter: sqrt(perDegree / meanWeight),
-    rejected: places.flatMap((index, i) => {
-      if (kept.includes(i)) return [];
-      return [
-        {
-          index,
-          reason: `${Math.abs(scores[i]!).toFixed(1)} robust scales from the fit in ${band}`,
-        },
-      ];
-    }),
-  };
 }

@@ -1,5 +1,4 @@
 /** Readings back to calibration, optical depths, exponent and turbidity. @module retrieval */
-export type { Budget, BudgetRow } from "../_budget.js";
 export type { Covariance2 } from "./_weightedLine.js";
 export {
   type AerosolOpticalDepth,
@@ -17,7 +16,7 @@ export {
   calibrationDrift,
   type DatedCalibration,
 } from "./calibrationDrift.js";
-export { cloudScreening, SCREENING_REASONS } from "./cloudScreening.js";
+export { cloudScreening } from "./cloudScreening.js";
 export {
   type CombinedCalibration,
   combinedCalibration,
@@ -54,6 +53,7 @@ export {
 } from "./precipitableWater.js";
 export { type KnownColumn, reducedSignals, type SignalReduction } from "./reducedSignals.js";
 export { type KnownTerm, residualOpticalDepth, type SlantPath } from "./residualOpticalDepth.js";
+export { screeningReasons } from "./screeningReasons.js";
 export {
   type CalibrationTransfer,
   type TransferredCalibration,

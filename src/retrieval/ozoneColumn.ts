@@ -1,5 +1,6 @@
 /** Ozone column from readings of the direct sun. */
-import { type Budget, independentBudget } from "../_budget.js";
+import { independentBudget } from "../_budget.js";
+import type { Budget } from "../budget.js";
 import { log, pow } from "../_numeric.js";
 import { MOLECULES_PER_DOBSON_UNIT } from "../constants.js";
 import type {
@@ -10,7 +11,8 @@ import type {
   SquareMetres,
 } from "../units.js";
 import { checkOzone } from "./_checkOzone.js";
-import { dot, leastSquares } from "./_leastSquares.js";
+import { ozoneParts, solveOzone } from "./_ozoneParts.js";
+import { dot } from "./_smallMatrices.js";
 
 /** One channel's reading. */
 export interface OzoneChannel {
@@ -106,10 +108,10 @@ export function ozoneColumn(channels: readonly OzoneChannel[], path: OzonePath):
   const slant = Float64Array.from(channels, ({ constant, signal, knownSlantDepth }) => {
     return log(constant / (signal * distance)) - knownSlantDepth;
   });
-  const unknowns = solve(columns, channels, slant);
+  const unknowns = solveOzone(columns, channels, slant);
   // what each channel's slant depth does to ozone: the fit of a depth of 1 in that channel alone
   const gains = channels.map((_, i) => {
-    return solve(
+    return solveOzone(
       columns,
       channels,
       Float64Array.from(channels, (_, j) => (i === j ? 1 : 0)),
@@ -126,52 +128,4 @@ export function ozoneColumn(channels: readonly OzoneChannel[], path: OzonePath):
     ),
     ...independentBudget(ozoneParts(channels, path, gains, ozoneDu)),
   };
-}
-
-function solve(
-  columns: readonly Float64Array[],
-  channels: readonly OzoneChannel[],
-  data: Float64Array,
-): Float64Array {
-  const weights = Float64Array.from(channels, (channel) => {
-    const signal = channel.signalStandardUncertainty / channel.signal;
-    const constant = channel.constantStandardUncertainty / channel.constant;
-    return 1 / (signal * signal + constant * constant);
-  });
-  const fit = leastSquares(columns, data, weights);
-  if (fit !== undefined) return fit.unknowns;
-  throw new RangeError(
-    "ozoneColumn: channels must tell ozone from the aerosol: give other wavelengths or fewer powers",
-  );
-}
-
-function ozoneParts(
-  channels: readonly OzoneChannel[],
-  path: OzonePath,
-  gains: readonly number[],
-  ozoneDu: number,
-): { input: string; standardUncertainty: number; sensitivity: number }[] {
-  const known = channels.reduce((sum, channel, i) => sum + gains[i]! * channel.knownSlantDepth, 0);
-  const part = (input: string, standardUncertainty: number, sensitivity: number) => ({
-    input,
-    standardUncertainty,
-    sensitivity,
-  });
-  return [
-    ...channels.flatMap(({ wavelengthNm, ...channel }, i) => [
-      part(
-        `signal ${wavelengthNm} nm`,
-        channel.signalStandardUncertainty,
-        -gains[i]! / channel.signal,
-      ),
-      part(
-        `constant ${wavelengthNm} nm`,
-        channel.constantStandardUncertainty,
-        gains[i]! / channel.constant,
-      ),
-    ]),
-    part("known slant depths", path.knownRelativeUncertainty, -known),
-    part("ozone air mass", path.ozoneAirMassRelativeUncertainty, -ozoneDu),
-    part("cross-sections", path.crossSectionRelativeUncertainty, -ozoneDu),
-  ];
 }

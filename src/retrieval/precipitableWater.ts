@@ -1,13 +1,11 @@
 /** Water vapour above a site from one absorbing band. */
-import { type Budget, independentBudget } from "../_budget.js";
-import { checkNumber, checkRecord } from "../_check.js";
+import { independentBudget } from "../_budget.js";
+import type { Budget } from "../budget.js";
 import { log, pow } from "../_numeric.js";
 import type { AstronomicalUnits, Centimetres, Dimensionless } from "../units.js";
-import { checkAirMass } from "./_checkAirMass.js";
+import { checkWater } from "./_checkWater.js";
 
 const NAME = "precipitableWater";
-const [LEAST, MOST] = [Number.MIN_VALUE, Number.MAX_VALUE];
-
 /** A reading in a water vapour band and the band's calibration. */
 export interface WaterReading {
   /** Reading in the band, above 0. */
@@ -94,23 +92,4 @@ export function precipitableWater(reading: WaterReading): PrecipitableWater {
       part("band exponent", reading.bandExponentStandardUncertainty, byExponent),
     ]),
   };
-}
-
-function checkWater(reading: WaterReading): void {
-  checkRecord(reading, "reading", NAME);
-  checkNumber(reading.signal, LEAST, MOST, "", "signal", NAME);
-  checkNumber(reading.constant, LEAST, MOST, "", "constant", NAME);
-  checkNumber(reading.sunDistanceAu, 0.9, 1.1, "au", "sunDistanceAu", NAME);
-  checkAirMass(reading.airMass, "airMass", NAME);
-  checkNumber(reading.knownSlantDepth, -100, 100, "", "knownSlantDepth", NAME);
-  checkNumber(reading.bandFactor, LEAST, 100, "", "bandFactor", NAME);
-  checkNumber(reading.bandExponent, 0.1, 1.5, "", "bandExponent", NAME);
-  const spreads = [
-    "signalStandardUncertainty",
-    "constantStandardUncertainty",
-    "knownSlantStandardUncertainty",
-    "bandFactorStandardUncertainty",
-    "bandExponentStandardUncertainty",
-  ] as const;
-  for (const field of spreads) checkNumber(reading[field], 0, MOST, "", field, NAME);
 }

@@ -1,6 +1,8 @@
 /** Calibration carried from one instrument to another by simultaneous readings. */
-import { type Budget, independentBudget } from "../_budget.js";
-import { checkList, checkNumber, checkRecord } from "../_check.js";
+import { independentBudget } from "../_budget.js";
+import type { Budget } from "../budget.js";
+import { checkList, checkRecord } from "../_check.js";
+import { checkPositive, checkUncertainty } from "./_checkPositive.js";
 import { exp, log, sqrt } from "../_numeric.js";
 import type { Dimensionless } from "../units.js";
 import { checkEnough, checkReadings } from "./_checkReadings.js";
@@ -100,8 +102,8 @@ function checkTransfer(transfer: CalibrationTransfer): CalibrationTransfer {
     );
   }
   const { referenceConstant, referenceStandardUncertainty } = transfer;
-  checkNumber(referenceConstant, Number.MIN_VALUE, Number.MAX_VALUE, "", "referenceConstant", NAME);
+  checkPositive(referenceConstant, "referenceConstant", NAME);
   const spread = "referenceStandardUncertainty";
-  checkNumber(referenceStandardUncertainty, 0, Number.MAX_VALUE, "", spread, NAME);
+  checkUncertainty(referenceStandardUncertainty, spread, NAME);
   return transfer;
 }

@@ -1,5 +1,5 @@
 /** The sums of the law of propagation. */
-import type { BudgetRow } from "../_budget.js";
+import type { BudgetRow } from "../budget.js";
 import { refuse } from "../_check.js";
 
 /** Variance and rows from signed sensitivities and the correlation matrix. */

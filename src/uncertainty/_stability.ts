@@ -30,7 +30,7 @@ export function isStable(blocks: readonly Summary[], digits: number): boolean {
 function numericalTolerance(value: number, digits: number): number {
   if (value === 0) return 0;
   let exponent = 0;
-  for (let v = value; v < 10 ** (digits - 1); v *= 10) exponent--;
-  for (let v = value; v >= 10 ** digits; v /= 10) exponent++;
+  for (let v = value; v < pow(10, digits - 1); v *= 10) exponent--;
+  for (let v = value; v >= pow(10, digits); v /= 10) exponent++;
   return 0.5 * pow(10, exponent);
 }

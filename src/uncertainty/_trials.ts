@@ -1,5 +1,5 @@
 /** Running a model many times. */
-import type { BudgetRow } from "../_budget.js";
+import type { BudgetRow } from "../budget.js";
 import { refuse } from "../_check.js";
 import { moments } from "../_moments.js";
 import type { Draws } from "./_draws.js";

@@ -1,5 +1,4 @@
 /** From the uncertainties of inputs to the uncertainty of any result. @module uncertainty */
-export type { Budget, BudgetRow } from "../_budget.js";
 export type { Correlation, Model, UncertainInput } from "./_inputs.js";
 export { coverageFactor } from "./coverageFactor.js";
 export { type MonteCarloOptions, type MonteCarloResult, monteCarlo } from "./monteCarlo.js";

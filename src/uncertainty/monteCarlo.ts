@@ -1,5 +1,5 @@
 /** Propagation of distributions by Monte Carlo. */
-import type { Budget } from "../_budget.js";
+import type { Budget } from "../budget.js";
 import { checkNumber, checkRecord, refuse } from "../_check.js";
 import type { Fraction } from "../units.js";
 import { prepareDraws } from "./_draws.js";

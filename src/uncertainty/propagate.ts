@@ -1,5 +1,5 @@
 /** The law of propagation of uncertainty. */
-import type { Budget } from "../_budget.js";
+import type { Budget } from "../budget.js";
 import { checkRecord, refuse } from "../_check.js";
 import { sqrt } from "../_numeric.js";
 import { combine, effectiveDegrees } from "./_combine.js";

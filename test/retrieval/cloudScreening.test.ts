@@ -1,6 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { cloudScreening, SCREENING_REASONS } from "../../src/index.js";
+import { cloudScreening, screeningReasons } from "../../src/index.js";
 import { between } from "../_generators.js";
 import { randomOf } from "../_stationDays.js";
 import { expectRefusal } from "../_tolerance.js";
@@ -78,7 +78,7 @@ describe("independent fixtures", () => {
     const far = cloudScreening(minutes(300), bank, 4);
     expect(far[150]).toBe(4);
     expect(far[20]).toBe(0);
-    expect(SCREENING_REASONS.length).toBe(5);
+    expect(screeningReasons.length).toBe(5);
   });
 });
 
