@@ -16,7 +16,7 @@ import type { Degrees } from "../units.js";
  * @throws TypeError if an argument is of the wrong kind; RangeError if the angle is out of range
  * @example
  * import { airMassKastenYoung, airMassPerDegree } from "airlight";
- * airMassPerDegree(airMassKastenYoung, 70); // => 0.1349
+ * airMassPerDegree(airMassKastenYoung, 70); // => 0.13694
  */
 export function airMassPerDegree(
   airMass: (zenithDeg: Degrees) => number,

@@ -50,8 +50,8 @@ export interface AngstromCurvature {
  * const u = 0.004 * 0.004;
  * const covariance = [u, 0, 0, 0, 0, u, 0, 0, 0, 0, u, 0, 0, 0, 0, u];
  * const fit = angstromCurvature([412, 500, 675, 862], [0.19, 0.15, 0.10, 0.074], { covariance, referenceNm: 500 });
- * fit.exponent; // => 1.287
- * fit.exponentStandardUncertainty; // => 0.083
+ * fit.exponent; // => 1.273
+ * fit.exponentStandardUncertainty; // => 0.0974
  */
 export function angstromCurvature(
   wavelengthsNm: ArrayLike<Nanometres>,

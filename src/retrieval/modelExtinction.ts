@@ -53,15 +53,15 @@ export interface PredictedExtinction {
  * @throws TypeError if an argument is of the wrong kind; RangeError if stars or air masses do not differ or a value is out of range
  * @example
  * import { gaussianPassband, modelExtinction, planckRadiance, tabulate, wavelengthGrid } from "airlight";
- * const star = (temperatureK, colourIndex) => ({
+ * const stars = [[12000, -0.1], [4500, 1.1]].map(([temperatureK, colourIndex]) => ({
  *   spectrum: tabulate((nm) => planckRadiance(nm, temperatureK), wavelengthGrid(200, 700, 5)), colourIndex,
- * });
+ * }));
  * const blue = modelExtinction({
- *   passband: gaussianPassband(440, 90), stars: [star(12000, -0.1), star(4500, 1.1)], airMasses: [1, 1.5, 2],
+ *   passband: gaussianPassband(440, 90), stars, airMasses: [1, 1.5, 2],
  *   opticalDepth: (nm) => 0.0984 * (550 / nm) ** 4.09,
  * });
- * blue.extinction; // => 0.2702
- * blue.secondOrder; // => -0.01609
+ * blue.extinction; // => 0.28752
+ * blue.secondOrder; // => -0.02912
  */
 export function modelExtinction(model: ExtinctionModel): PredictedExtinction {
   checkModel(model);

@@ -24,7 +24,7 @@ const NAME = "opticalDepthCovariance";
  *   airMass: 2, airMassPerDeg: 0.06, zenithStandardUncertaintyDeg: 0.1, terms: [],
  * };
  * const depths = [reading, { ...reading, constant: 1.8 }].map(aerosolOpticalDepth);
- * opticalDepthCovariance(depths, ["zenith angle"])[1] * 1e7; // => 3.857
+ * opticalDepthCovariance(depths, ["zenith angle"])[1] * 1e7; // => 3.856
  */
 export function opticalDepthCovariance(
   depths: readonly AerosolOpticalDepth[],

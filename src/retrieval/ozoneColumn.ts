@@ -80,15 +80,13 @@ export interface OzoneColumn extends Budget {
  *   tell ozone from the aerosol
  * @example
  * import { ozoneColumn } from "airlight";
- * const [u, m] = [0.002, 2];
- * const read = (wavelengthNm, crossSectionM2, slant) => ({
- *   wavelengthNm, crossSectionM2, signal: Math.exp(-slant), signalStandardUncertainty: 0,
- *   constant: 1, constantStandardUncertainty: u, knownSlantDepth: 0,
- * });
- * const n = 300 * 2.68678e20 * m;
- * const pair = [read(306, 1.6e-23, 1.6e-23 * n + 0.2), read(320, 2.4e-24, 2.4e-24 * n + 0.2)];
+ * const slantMolecules = 300 * 2.68678e20 * 2;
+ * const pair = [[306, 1.6e-23], [320, 2.4e-24]].map(([wavelengthNm, crossSectionM2]) => ({
+ *   wavelengthNm, crossSectionM2, signal: Math.exp(-0.2 - crossSectionM2 * slantMolecules), signalStandardUncertainty: 0,
+ *   constant: 1, constantStandardUncertainty: 0.002, knownSlantDepth: 0,
+ * }));
  * const ozone = ozoneColumn(pair, {
- *   sunDistanceAu: 1, ozoneAirMass: m, ozoneAirMassRelativeUncertainty: 0, aerosolAirMass: m, aerosolPowers: [0],
+ *   sunDistanceAu: 1, ozoneAirMass: 2, ozoneAirMassRelativeUncertainty: 0, aerosolAirMass: 2, aerosolPowers: [0],
  *   knownRelativeUncertainty: 0, crossSectionRelativeUncertainty: 0.01,
  * });
  * ozone.ozoneDu; // => 300.0

@@ -59,8 +59,8 @@ export interface PrecipitableWater extends Budget {
  *   airMass: 2, knownSlantDepth: 0.1, knownSlantStandardUncertainty: 0.01,
  *   bandFactor: 0.55, bandFactorStandardUncertainty: 0.01, bandExponent: 0.6, bandExponentStandardUncertainty: 0.01,
  * });
- * water.waterCm; // => 0.5703
- * water.standardUncertainty; // => 0.0305
+ * water.waterCm; // => 0.56707
+ * water.standardUncertainty; // => 0.02841
  */
 export function precipitableWater(reading: WaterReading): PrecipitableWater {
   checkWater(reading);

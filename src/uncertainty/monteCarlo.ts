@@ -60,7 +60,7 @@ export interface MonteCarloResult extends Budget {
  * import { monteCarlo, seededRandom } from "airlight";
  * const square = monteCarlo(({ x }) => x * x, { x: { value: 0, standardUncertainty: 1 } }, { random: seededRandom(1) });
  * square.value; // => 1.0
- * square.shortestInterval[1]; // => 3.84
+ * square.shortestInterval[1]; // => 3.82
  */
 export function monteCarlo<Name extends string>(
   model: Model<Name>,

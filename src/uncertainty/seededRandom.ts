@@ -20,7 +20,7 @@ export type RandomSource = () => number;
  * @example
  * import { seededRandom } from "airlight";
  * const random = seededRandom(1);
- * random(); // => 0.1
+ * random(); // => 0.568606
  */
 export function seededRandom(seed: number): RandomSource {
   checkNumber(seed, 0, 0xffffffff, "", "seed", "seededRandom");
