@@ -1,4 +1,10 @@
 /** Readings back to calibration, optical depths, exponent and turbidity. @module retrieval */
+export type {
+  ArchiveChannel,
+  ArchiveReadings,
+  ArchiveResult,
+  ArchiveSettings,
+} from "./_archive.js";
 export type { Covariance2 } from "./_weightedLine.js";
 export {
   type AerosolOpticalDepth,
@@ -6,6 +12,7 @@ export {
   type SunReading,
   type UncertainTerm,
 } from "./aerosolOpticalDepth.js";
+export { aerosolOpticalDepths } from "./aerosolOpticalDepths.js";
 export { airMassPerDegree } from "./airMassPerDegree.js";
 export { type AngstromCurvature, angstromCurvature } from "./angstromCurvature.js";
 export { type AngstromResult, angstromFit } from "./angstromFit.js";
@@ -53,6 +60,7 @@ export {
 } from "./precipitableWater.js";
 export { type KnownColumn, reducedSignals, type SignalReduction } from "./reducedSignals.js";
 export { type KnownTerm, residualOpticalDepth, type SlantPath } from "./residualOpticalDepth.js";
+export { resampleWithCovariance, type UncertainSpectrum } from "./resampleWithCovariance.js";
 export { screeningReasons } from "./screeningReasons.js";
 export {
   type CalibrationTransfer,
