@@ -60,6 +60,7 @@ export {
 } from "./precipitableWater.js";
 export { type KnownColumn, reducedSignals, type SignalReduction } from "./reducedSignals.js";
 export { type KnownTerm, residualOpticalDepth, type SlantPath } from "./residualOpticalDepth.js";
+export { type OutsideSpectrum, type RemovalOptions, removeAtmosphere } from "./removeAtmosphere.js";
 export { resampleWithCovariance, type UncertainSpectrum } from "./resampleWithCovariance.js";
 export { screeningReasons } from "./screeningReasons.js";
 export {
