@@ -117,9 +117,8 @@ export function sunTable({ views, viewUncertainties }: StationResult): Table {
       ["± (95 %)", "K"],
       ["duv", ""],
       ["x", ""],
-      ["± (95 %)", ""],
       ["y", ""],
-      ["± (95 %)", ""],
+      ["± (95 %)", "x, y"],
       ["display", "sRGB"],
     ],
     rows: views.map((view, i) => [
@@ -133,9 +132,8 @@ export function sunTable({ views, viewUncertainties }: StationResult): Table {
         : (FACTOR_95 * viewUncertainties[i]!.temperatureK!).toFixed(0),
       view.colourTemperature?.duv.toFixed(4) ?? "none",
       view.chromaticity[0].toFixed(4),
-      (FACTOR_95 * viewUncertainties[i]!.chromaticity[0]).toFixed(4),
       view.chromaticity[1].toFixed(4),
-      (FACTOR_95 * viewUncertainties[i]!.chromaticity[1]).toFixed(4),
+      (FACTOR_95 * Math.max(...viewUncertainties[i]!.chromaticity)).toFixed(4),
       view.displayColour,
     ]),
   };
