@@ -18,6 +18,9 @@ export function signalUnit({ station }: StationResult): string {
 /** Half width of a 95 % interval over the standard uncertainty. */
 const FACTOR_95 = coverageFactor(0.95, Number.POSITIVE_INFINITY);
 
+/** Heading of such a half width; its spaces do not break. */
+const PLUS_MINUS = "±\u00a095\u00a0%";
+
 /** Constants and aerosol of the calibration morning. */
 export function calibrationTable(result: StationResult): Table {
   const unit = signalUnit(result);
@@ -26,11 +29,11 @@ export function calibrationTable(result: StationResult): Table {
     columns: [
       ["channel", "nm"],
       ["constant at 1 au", unit],
-      ["± (95 %)", unit],
-      ["± (95 %)", "%"],
+      [PLUS_MINUS, unit],
+      [PLUS_MINUS, "%"],
       ["error of the fit", "%"],
       ["aerosol depth", ""],
-      ["± (95 %)", ""],
+      [PLUS_MINUS, ""],
       ["scatter", "%"],
       ["kept", "readings"],
       ["rejected", "readings"],
@@ -66,11 +69,11 @@ export function aerosolTable({ aerosol, calibrations, station }: StationResult):
       ["hour", "UTC"],
       ["air mass", ""],
       [`depth at ${calibrations[k]!.optics.channel.centreNm} nm`, ""],
-      ["± (95 %)", ""],
+      [PLUS_MINUS, ""],
       ["exponent", ""],
-      ["± (95 %)", ""],
+      [PLUS_MINUS, ""],
       ["turbidity", "at 1000 nm"],
-      ["± (95 %)", ""],
+      [PLUS_MINUS, ""],
       ["clear", "readings"],
       ["cloudy", "readings"],
     ],
@@ -112,13 +115,13 @@ export function sunTable({ views, viewUncertainties }: StationResult): Table {
       ["true height", "degrees"],
       ["seen height", "degrees"],
       ["illuminance", "lx"],
-      ["± (95 %)", "lx"],
+      [PLUS_MINUS, "lx"],
       ["colour temp.", "K"],
-      ["± (95 %)", "K"],
+      [PLUS_MINUS, "K"],
       ["duv", ""],
       ["x", ""],
       ["y", ""],
-      ["± (95 %)", "x, y"],
+      [PLUS_MINUS, "x, y"],
       ["display", "sRGB"],
     ],
     rows: views.map((view, i) => [
