@@ -8,7 +8,7 @@ const rooms = Object.keys(packageJson.exports)
 
 export default {
   name: "Airlight",
-  entryPoints: ["../src/units.ts", "../src/constants.ts", ...rooms],
+  entryPoints: ["../src/units.ts", "../src/constants.ts", "../src/budget.ts", ...rooms],
   out: "../.docs",
   readme: "../README.md",
   projectDocuments: ["../examples/paths/air-masses.md"],
