@@ -1,6 +1,13 @@
 import { defineConfig } from "vitest/config";
 
+/** The unit tests: sources only, no dist. The tests of the package are in vitest.package.config.ts. */
 export default defineConfig({
   root: new URL("..", import.meta.url).pathname,
-  test: { include: ["test/**/*.test.ts"], environment: "node", testTimeout: 60_000 },
+  test: {
+    include: ["test/**/*.test.ts"],
+    exclude: ["test/package/**", "test/examples/**"],
+    environment: "node",
+    testTimeout: 60_000,
+    coverage: { include: ["src/**"], reporter: ["text"] },
+  },
 });

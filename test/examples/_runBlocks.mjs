@@ -1,0 +1,35 @@
+/**
+ * Imports every block of a folder in turn and prints, as one line of JSON at the end, what went wrong in each.
+ * node _runBlocks.mjs (in the folder that holds blocks.json and the blocks); Deno runs it too.
+ */
+import { readFileSync } from "node:fs";
+import { difference, parsePrinted } from "./_printed.mjs";
+
+const ids = JSON.parse(readFileSync(new URL("./blocks.json", import.meta.url), "utf8"));
+const results = {};
+let current;
+
+/** Called from the blocks in place of `expression; // => text`. */
+globalThis.checkPrinted = (line, text, actual) => {
+  const wrong = difference(parsePrinted(text), actual);
+  current.checked += 1;
+  if (wrong !== undefined) current.errors.push(`line ${line}: ${wrong}`);
+  return actual;
+};
+console.log = () => {};
+
+for (const id of ids) {
+  current = { checked: 0, errors: [] };
+  results[id] = current;
+  try {
+    await import(`./${id}.mjs`);
+  } catch (error) {
+    current.errors.push(
+      String(error?.stack ?? error)
+        .split("\n")
+        .slice(0, 3)
+        .join(" "),
+    );
+  }
+}
+process.stdout.write(`\n${JSON.stringify(results)}\n`);

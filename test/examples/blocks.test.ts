@@ -1,0 +1,131 @@
+import { execFileSync } from "node:child_process";
+import { copyFileSync, mkdirSync, rmSync, writeFileSync } from "node:fs";
+import ts from "typescript";
+import { describe, expect, it } from "vitest";
+import { ROOT } from "../_source.js";
+import {
+  allBlocks,
+  type Block,
+  commentBlocks,
+  executable,
+  importFaults,
+  markdownBlocks,
+  plainImports,
+} from "./_blocks.js";
+
+interface Result {
+  checked: number;
+  errors: string[];
+}
+
+const FOLDER = `${ROOT}.cache/examples/`;
+
+/** Writes the blocks as modules, runs them in one process against dist, and returns what each found wrong. */
+function runBlocks(blocks: readonly Block[]): Record<string, Result> {
+  rmSync(FOLDER, { recursive: true, force: true });
+  mkdirSync(FOLDER, { recursive: true });
+  for (const { id, code } of blocks) {
+    let script: string;
+    try {
+      script = executable(code);
+    } catch (error) {
+      script = `throw new Error(${JSON.stringify((error as Error).message)});`;
+    }
+    writeFileSync(`${FOLDER}${id}.mjs`, script);
+    // "export {}" makes a module of it
+    writeFileSync(`${FOLDER}${id}.ts`, `${plainImports(code)}\nexport {};\n`);
+  }
+  writeFileSync(`${FOLDER}blocks.json`, JSON.stringify(blocks.map((block) => block.id)));
+  for (const file of ["_printed.mjs", "_runBlocks.mjs"])
+    copyFileSync(`${ROOT}test/examples/${file}`, FOLDER + file);
+  const output = execFileSync(process.execPath, [`${FOLDER}_runBlocks.mjs`], { encoding: "utf8" });
+  return JSON.parse(output.trimEnd().split("\n").at(-1)!);
+}
+
+/** Errors of the compiler, by file. */
+function typeErrors(blocks: readonly Block[]): Map<string, string[]> {
+  const program = ts.createProgram(
+    blocks.map((block) => `${FOLDER}${block.id}.ts`),
+    {
+      target: ts.ScriptTarget.ES2022,
+      module: ts.ModuleKind.NodeNext,
+      moduleResolution: ts.ModuleResolutionKind.NodeNext,
+      lib: ["lib.es2022.d.ts", "lib.dom.d.ts"],
+      types: [],
+      strict: true,
+      noEmit: true,
+      skipLibCheck: true,
+    },
+  );
+  const errors = new Map<string, string[]>();
+  for (const { file, messageText } of ts.getPreEmitDiagnostics(program)) {
+    const id = file?.fileName.slice(FOLDER.length, -3) ?? "";
+    errors.set(id, [...(errors.get(id) ?? []), ts.flattenDiagnosticMessageText(messageText, " ")]);
+  }
+  return errors;
+}
+
+const blocks = allBlocks();
+const results = runBlocks(blocks);
+const types = typeErrors(blocks);
+
+describe("every block a reader can copy", () => {
+  it("is found", () => {
+    expect(blocks.length).toBeGreaterThan(0);
+    expect(new Set(blocks.map((block) => block.id)).size).toBe(blocks.length);
+    expect(Object.keys(results)).toHaveLength(blocks.length);
+    expect(types.get("")).toBeUndefined();
+  });
+
+  it.each(blocks)(
+    "$where imports what it uses, compiles, runs and prints the truth",
+    ({ id, where, code }) => {
+      expect(importFaults(code)).toEqual([]);
+      expect(types.get(id) ?? []).toEqual([]);
+      expect(results[id]!.errors).toEqual([]);
+      if (where.startsWith("src/")) expect(results[id]!.checked).toBeGreaterThan(0);
+    },
+  );
+});
+
+describe("the extractor", () => {
+  it("finds the examples of comments and pages", () => {
+    const source = `/** Head. */\n\n/**\n * A.\n * @example\n * import { a } from "airlight";\n * a(\n *   1,\n * ); // => 1\n * @see b\n */\nexport function a() {}\n`;
+    const [found] = commentBlocks("src/air/a.ts", source);
+    expect(found?.where).toBe("src/air/a.ts:5");
+    expect(found?.code).toBe('import { a } from "airlight";\na(\n  1,\n); // => 1');
+    const page = "# A\n\n```sh\nnpm\n```\n\n```ts\nf();\n```\ntext\n```js\ng();\n```\n";
+    expect(markdownBlocks("A.md", page).map((b) => [b.where, b.code])).toEqual([
+      ["A.md:7", "f();"],
+      ["A.md:11", "g();"],
+    ]);
+  });
+
+  it.each([
+    ["f(1); // => 2", "f(1)"],
+    ["const a = f(1); // => 2", "f(1)"],
+    ["console.log(f(1)); // => 2", "f(1)"],
+    ["f(\n  1,\n); // => 2", "f(1)"],
+  ])("%j is checked", (code, expression) => {
+    const script = executable(code);
+    expect(script.replace(/\s/g, "")).toContain(`"2",${expression})`.replace(/\s/g, ""));
+  });
+
+  it("refuses a printed value that belongs to no expression", () => {
+    expect(() => executable("if (a) {\n  // => 3\n}")).toThrow("line 2");
+    expect(() => executable("f(1);\n// => 3")).toThrow("line 2");
+  });
+
+  it("demands imports from the package, and other packages announced", () => {
+    expect(importFaults("f(1);")).toHaveLength(1);
+    expect(importFaults('import { a } from "./x.js";')).toHaveLength(2);
+    expect(importFaults('import { a } from "airlight/air";')).toEqual([]);
+    expect(importFaults('import { a } from "npm:airlight@0.1";')).toEqual([]);
+    const culori = 'import { a } from "airlight";\nimport { b } from "culori";';
+    expect(importFaults(culori)).toHaveLength(1);
+    expect(importFaults(`// npm install airlight culori\n${culori}`)).toEqual([]);
+    expect(plainImports('import { a } from "npm:airlight@0.1/air";')).toBe(
+      'import { a } from "airlight/air";',
+    );
+  });
+});

@@ -1,0 +1,101 @@
+/**
+ * Changes each numeric literal of the formulas a little, one at a time, runs the tests of its room, and lists the changes no test noticed.
+ * npm run nudge                    every room
+ * npm run nudge -- air path        only these; a file of src can be named too
+ * npm run nudge -- --guards air    the limits given to guards as well
+ * Exit code 1 if a change of 0.1 % (or of a whole step, for what counts) goes unnoticed and is not explained in _equivalent.ts.
+ */
+import { fork } from "node:child_process";
+import { existsSync } from "node:fs";
+import { cpus } from "node:os";
+import { filesUnder, ROOT } from "../_source.js";
+import { ROOMS } from "../house/_rules.js";
+import { EQUIVALENT } from "./_equivalent.js";
+import { type Nudge, nudgesOf } from "./_literals.js";
+import type { Job, Report } from "./_worker.js";
+
+/** A change whose tests take longer is taken for endless, and so for noticed. */
+const MOST_SECONDS = 60;
+
+interface Outcome {
+  readonly nudge: Nudge;
+  readonly noticed: number;
+}
+
+/** Runs a job in a process of its own; a hung literal ends the process, and another goes on after it. */
+async function runJob({ tests, nudges }: Job): Promise<Outcome[]> {
+  const outcomes: Outcome[] = [];
+  while (outcomes.length < nudges.length) {
+    const worker = fork(`${ROOT}test/nudge/_worker.ts`);
+    let timer: NodeJS.Timeout | undefined;
+    const wind = (): void => {
+      clearTimeout(timer);
+      timer = setTimeout(() => worker.kill("SIGKILL"), MOST_SECONDS * 1000);
+    };
+    let broken: string | undefined;
+    worker.on("message", (report: Report) => {
+      wind();
+      broken = report.broken;
+      const nudge = nudges[outcomes.length];
+      if (report.noticed !== undefined && nudge) outcomes.push({ nudge, noticed: report.noticed });
+    });
+    wind();
+    worker.send({ tests, nudges: nudges.slice(outcomes.length) } satisfies Job);
+    const code = await new Promise<number | null>((resolve) => worker.on("close", resolve));
+    clearTimeout(timer);
+    if (broken !== undefined) throw new Error(`${tests[0]} ...: ${broken}`);
+    if (code === 0) break;
+    if (worker.signalCode !== "SIGKILL") throw new Error(`a worker ended with code ${code}`);
+    outcomes.push({ nudge: nudges[outcomes.length]!, noticed: 0 });
+  }
+  return outcomes;
+}
+
+/** The jobs for a room or a file, shared out so that every processor has something to do. */
+function jobsOf(name: string, withGuards: boolean, shares: number): Job[] {
+  const room = name.replace(/^src\//, "").split("/")[0]!;
+  if (!existsSync(`${ROOT}test/${room}`)) return [];
+  const tests = filesUnder(`test/${room}`, ".test.ts");
+  const files = filesUnder(`src/${room}`, ".ts").filter((path) => name === room || path === name);
+  const nudges = files.flatMap((path) => nudgesOf(path, withGuards));
+  const size = Math.max(12, Math.ceil(nudges.length / shares));
+  const starts = nudges.flatMap((_, i) => (i % size === 0 ? [i] : []));
+  return starts.map((i) => ({ tests, nudges: nudges.slice(i, i + size) }));
+}
+
+/** Why an unnoticed change is right to go unnoticed, if somebody has said so. */
+function reason({ path, source, text }: Nudge): string | undefined {
+  return EQUIVALENT.find((e) => e.path === path && source.includes(e.line) && e.literal === text)
+    ?.why;
+}
+
+const args = process.argv.slice(2);
+const named = args.filter((arg) => !arg.startsWith("--"));
+const processes = Math.max(1, Math.min(4, cpus().length));
+const wanted = named.length > 0 ? named : ROOMS;
+const queue = wanted.flatMap((name) => jobsOf(name, args.includes("--guards"), processes));
+const outcomes: Outcome[] = [];
+await Promise.all(
+  Array.from({ length: processes }, async () => {
+    for (let job = queue.shift(); job !== undefined; job = queue.shift())
+      outcomes.push(...(await runJob(job)));
+  }),
+);
+
+function list(title: string, some: readonly Outcome[], which: 0 | -1): void {
+  if (some.length > 0) console.log(title);
+  for (const { nudge } of some)
+    console.log(
+      `  ${nudge.path}:${nudge.line}: ${nudge.text} -> ${nudge.changed.at(which)}   ${nudge.source}`,
+    );
+}
+const silent = outcomes.filter((o) => o.noticed < 0);
+const unnoticed = silent.filter((o) => reason(o.nudge) === undefined);
+const blunt = outcomes.filter((o) => o.noticed > 0);
+list("Noticed at 0.1 %, not at one unit of the last digit:", blunt, 0);
+list("Not noticed:", unnoticed, -1);
+const explained = silent.length - unnoticed.length;
+console.log(
+  `${outcomes.length} literals changed: ${unnoticed.length} not noticed, ${explained} explained, ${blunt.length} noticed only at 0.1 %`,
+);
+if (outcomes.length === 0 || unnoticed.length > 0) process.exitCode = 1;
