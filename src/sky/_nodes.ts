@@ -24,7 +24,7 @@ export function halfRangeNodes(count: number): Nodes {
 }
 
 /** The i-th root of the Legendre polynomial of degree `count`, largest first, by Newton's method, and its weight on (-1, 1). */
-function gaussPoint(count: number, i: number): { point: number; weight: number } {
+export function gaussPoint(count: number, i: number): { point: number; weight: number } {
   let point = cos((Math.PI * (i + 0.75)) / (count + 0.5));
   let slope = 1;
   for (let step = 0; step < 6; step++) {
