@@ -1,10 +1,22 @@
-/** Quadrature over the cosines of one hemisphere. */
+/** Quadrature over (0, 1), such as the cosines of one hemisphere. */
 import { cos } from "../_numeric.js";
 
-/** Cosines in (0, 1) and the weights that integrate over them. */
+/** Points in (0, 1) and the weights that integrate over them. */
 export interface Nodes {
   readonly cosines: Float64Array;
   readonly weights: Float64Array;
+}
+
+/** Gauss-Legendre points on (0, 1), largest first, and their weights. */
+export function gaussNodes(count: number): Nodes {
+  const cosines = new Float64Array(count);
+  const weights = new Float64Array(count);
+  for (let i = 0; i < count; i++) {
+    const { point, weight } = gaussPoint(count, i);
+    cosines[i] = 0.5 * (1 + point);
+    weights[i] = 0.5 * weight;
+  }
+  return { cosines, weights };
 }
 
 /**
@@ -12,19 +24,17 @@ export interface Nodes {
  * Gaussian on (0, 1). Largest cosine first. Exact for polynomials in the cosine up to degree (2 count - 3) / 3.
  */
 export function halfRangeNodes(count: number): Nodes {
-  const cosines = new Float64Array(count);
-  const weights = new Float64Array(count);
+  const { cosines, weights } = gaussNodes(count);
   for (let i = 0; i < count; i++) {
-    const { point, weight } = gaussPoint(count, i);
-    const x = 0.5 * (1 + point);
+    const x = cosines[i]!;
     cosines[i] = x * x * x;
-    weights[i] = 1.5 * weight * x * x;
+    weights[i]! *= 3 * x * x;
   }
   return { cosines, weights };
 }
 
 /** The i-th root of the Legendre polynomial of degree `count`, largest first, by Newton's method, and its weight on (-1, 1). */
-export function gaussPoint(count: number, i: number): { point: number; weight: number } {
+function gaussPoint(count: number, i: number): { point: number; weight: number } {
   let point = cos((Math.PI * (i + 0.75)) / (count + 0.5));
   let slope = 1;
   for (let step = 0; step < 6; step++) {

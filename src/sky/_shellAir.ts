@@ -1,5 +1,5 @@
 /** Air in spherical shells: the standard atmosphere's molecules and a layer of ozone, scaled to given optical depths. */
-import { standardState } from "../air/_standardLayers.js";
+import { BASE_M, GEOPOTENTIAL_RADIUS_M, standardState } from "../air/_standardLayers.js";
 import { exp, log } from "../_numeric.js";
 
 /** Mean radius of the Earth, m (IUGG, rounded). */
@@ -18,6 +18,8 @@ const OZONE_BREADTH_M = 5_000;
 export interface ShellAir {
   /** Distance of the ground from the Earth's centre, m. */
   readonly groundM: number;
+  /** Heights above the ground where the gradient of density changes, m. */
+  readonly kinks: readonly number[];
   /** Logarithm of the scattering coefficient (per m) at every step of height above the ground. */
   readonly lnScattering: Float64Array;
   /** Logarithm of the extinction coefficient (per m), ozone included. */
@@ -38,6 +40,7 @@ export function shellAir(rayleighDepth: number, ozoneDepth: number, altitudeM: n
   const absorption = ozoneDepth / column(ozone);
   return {
     groundM: EARTH_RADIUS_M + altitudeM,
+    kinks: [...BASE_M.slice(1).map(geometricHeight), STANDARD_TOP_M].map((m) => m - altitudeM),
     lnScattering: molecules.map((density) => log(scattering * density)),
     lnExtinction: molecules.map((density, k) => log(scattering * density + absorption * ozone[k]!)),
   };
@@ -49,6 +52,11 @@ function moleculeDensity(heightM: number): number {
   const top = standardState(STANDARD_TOP_M).numberDensityM3;
   const rate = log(standardState(STANDARD_TOP_M - 1000).numberDensityM3 / top) / 1000;
   return top * exp(-rate * (heightM - STANDARD_TOP_M));
+}
+
+/** Geometric height of a geopotential height, both m. */
+function geometricHeight(geopotentialM: number): number {
+  return (GEOPOTENTIAL_RADIUS_M * geopotentialM) / (GEOPOTENTIAL_RADIUS_M - geopotentialM);
 }
 
 /** Integral over height of a table that falls or rises exponentially from step to step. */

@@ -1,17 +1,27 @@
 /** Sunlight scattered once along a line of sight from the ground. */
-import { ray, type ShellSky } from "./_rays.js";
+import type { Nodes } from "./_nodes.js";
+import { type ShellSky, sightRay } from "./_rays.js";
 import { sunlightAt } from "./_slantDepth.js";
-
-/** Points of the integral. */
-const POINTS = 64;
 
 /**
  * Integral of scattering coefficient times what comes through from the sun and to the eye.
- * `sun`, `view` and `between` are the cosines of the sun and the line of sight from the vertical and of the angle between them.
+ * `sun`, `view` and `between` are the cosines of the sun and the line of sight from the vertical and of the angle between them;
+ * `nodes` the points of the integral.
  */
-export function onceScattered(sky: ShellSky, sun: number, view: number, between: number): number {
+export function onceScattered(
+  sky: ShellSky,
+  sun: number,
+  view: number,
+  between: number,
+  nodes: Nodes,
+): number {
   const { groundM } = sky.air;
-  const { paths, heights, weights } = ray(sky, 0, view, POINTS, shadowEnd(groundM, sun, view, between));
+  const { paths, heights, weights } = sightRay(
+    sky,
+    view,
+    nodes,
+    shadowEnd(groundM, sun, view, between),
+  );
   let sum = 0;
   for (let k = 0; k < paths.length; k++) {
     const cosine = (groundM * sun + paths[k]! * between) / (groundM + heights[k]!);

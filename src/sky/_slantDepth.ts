@@ -4,7 +4,7 @@ import { coefficientAt, type ShellAir, TOP_M } from "./_shellAir.js";
 
 /** Step in height of the table, m, and its number of rows. */
 const ROW_M = 1000;
-const ROWS = 111;
+const ROWS = 119;
 /** Columns: cosines (j / 40)², j = 0 to 40. */
 const COLUMNS = 41;
 
@@ -44,7 +44,8 @@ function outwardDepth(air: ShellAir, heightM: number, cosine: number): number {
   for (let p = 0; p < 2 * PANELS; p++) {
     const x = (0.5 * p + 0.25 + (p % 2 === 0 ? 0.25 - GAUSS : GAUSS - 0.25)) * step;
     const path = length * x * x;
-    const gained = (path * (path + 2 * fall)) / (Math.sqrt(radius * radius + path * (path + 2 * fall)) + radius);
+    const gained =
+      (path * (path + 2 * fall)) / (Math.sqrt(radius * radius + path * (path + 2 * fall)) + radius);
     sum += x * coefficientAt(air.lnExtinction, heightM + gained);
   }
   return sum * step * length;
