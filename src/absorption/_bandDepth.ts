@@ -1,5 +1,5 @@
 /** Optical depth of saturating bands, Bird & Riordan 1986 (formulas from memory), without guards. */
-import { exp, log1p } from "../_numeric.js";
+import { exp, log } from "../_numeric.js";
 import {
   BAND_WAVELENGTHS_NM,
   MIXED_GAS_COEFFICIENTS,
@@ -14,7 +14,7 @@ const MIXED_LINEAR = 1.41;
 const MIXED_SATURATION = 118.93;
 const EXPONENT = -0.45;
 
-/** Coefficient of water vapour, per cm; straight lines between the table's wavelengths, 0 below 300 nm. */
+/** Coefficient of water vapour, per cm; straight lines between the table's wavelengths; 0 below 300 nm too, where both first rows are 0. */
 export function waterCoefficientOf(wavelengthNm: number): number {
   return between(WATER_COEFFICIENTS, wavelengthNm);
 }
@@ -26,16 +26,15 @@ export function mixedGasCoefficientOf(wavelengthNm: number): number {
 
 /** Slant depth of water vapour; x is coefficient times slant water in cm. */
 export function waterDepthOf(x: number): number {
-  return WATER_LINEAR * x * exp(EXPONENT * log1p(WATER_SATURATION * x));
+  return WATER_LINEAR * x * exp(EXPONENT * log(1 + WATER_SATURATION * x));
 }
 
 /** Slant depth of mixed gases; x is coefficient times pressure-corrected air mass. */
 export function mixedGasDepthOf(x: number): number {
-  return MIXED_LINEAR * x * exp(EXPONENT * log1p(MIXED_SATURATION * x));
+  return MIXED_LINEAR * x * exp(EXPONENT * log(1 + MIXED_SATURATION * x));
 }
 
 function between(table: readonly number[], wavelengthNm: number): number {
-  if (wavelengthNm < BAND_WAVELENGTHS_NM[0]!) return 0;
   const i = lastBelow(BAND_WAVELENGTHS_NM, wavelengthNm);
   const low = BAND_WAVELENGTHS_NM[i]!;
   const t = (wavelengthNm - low) / (BAND_WAVELENGTHS_NM[i + 1]! - low);

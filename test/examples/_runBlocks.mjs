@@ -1,5 +1,5 @@
 /**
- * Imports every block of a folder in turn and prints, as one line of JSON at the end, what went wrong in each.
+ * Imports every block of a folder in turn and prints, as its last line, in JSON, what went wrong in each.
  * node _runBlocks.mjs (in the folder that holds blocks.json and the blocks); Deno runs it too.
  */
 import { readFileSync } from "node:fs";
@@ -16,6 +16,7 @@ globalThis.checkPrinted = (line, text, actual) => {
   if (wrong !== undefined) current.errors.push(`line ${line}: ${wrong}`);
   return actual;
 };
+const print = console.log;
 console.log = () => {};
 
 for (const id of ids) {
@@ -32,4 +33,4 @@ for (const id of ids) {
     );
   }
 }
-process.stdout.write(`\n${JSON.stringify(results)}\n`);
+print(JSON.stringify(results));

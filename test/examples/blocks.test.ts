@@ -1,45 +1,27 @@
 import { execFileSync } from "node:child_process";
-import { copyFileSync, mkdirSync, rmSync, writeFileSync } from "node:fs";
 import ts from "typescript";
 import { describe, expect, it } from "vitest";
 import { ROOT } from "../_source.js";
 import {
   allBlocks,
   type Block,
+  type BlockResult,
   commentBlocks,
   executable,
   importFaults,
   markdownBlocks,
   plainImports,
+  resultsOf,
+  writeBlocks,
 } from "./_blocks.js";
-
-interface Result {
-  checked: number;
-  errors: string[];
-}
 
 const FOLDER = `${ROOT}.cache/examples/`;
 
-/** Writes the blocks as modules, runs them in one process against dist, and returns what each found wrong. */
-function runBlocks(blocks: readonly Block[]): Record<string, Result> {
-  rmSync(FOLDER, { recursive: true, force: true });
-  mkdirSync(FOLDER, { recursive: true });
-  for (const { id, code } of blocks) {
-    let script: string;
-    try {
-      script = executable(code);
-    } catch (error) {
-      script = `throw new Error(${JSON.stringify((error as Error).message)});`;
-    }
-    writeFileSync(`${FOLDER}${id}.mjs`, script);
-    // "export {}" makes a module of it
-    writeFileSync(`${FOLDER}${id}.ts`, `${plainImports(code)}\nexport {};\n`);
-  }
-  writeFileSync(`${FOLDER}blocks.json`, JSON.stringify(blocks.map((block) => block.id)));
-  for (const file of ["_printed.mjs", "_runBlocks.mjs"])
-    copyFileSync(`${ROOT}test/examples/${file}`, FOLDER + file);
+/** Runs the blocks in one process against dist; what each found wrong. */
+function runBlocks(blocks: readonly Block[]): Record<string, BlockResult> {
+  writeBlocks(FOLDER, blocks);
   const output = execFileSync(process.execPath, [`${FOLDER}_runBlocks.mjs`], { encoding: "utf8" });
-  return JSON.parse(output.trimEnd().split("\n").at(-1)!);
+  return resultsOf(output);
 }
 
 /** Errors of the compiler, by file. */
