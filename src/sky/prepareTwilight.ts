@@ -62,7 +62,7 @@ const SIGHT_POINTS = 10;
  * const twilight = prepareTwilight({ ...air, orders: "single" });
  * const zenith = { viewZenithDeg: 0, relativeAzimuthDeg: 0 };
  * const sunset = twilightStokes(twilight, { ...zenith, sunZenithDeg: 90 })[0];
- * sunset / twilightStokes(twilight, { ...zenith, sunZenithDeg: 95 })[0]; // => 1
+ * sunset / twilightStokes(twilight, { ...zenith, sunZenithDeg: 95 })[0]; // => 74.5
  */
 export function prepareTwilight(input: TwilightInput): PreparedTwilight {
   checkTwilight(input);

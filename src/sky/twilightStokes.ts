@@ -40,7 +40,7 @@ export interface TwilightDirection {
  * import { prepareTwilight, twilightStokes } from "airlight";
  * const air = { rayleighDepth: 0.1, ozoneDepth: 0.03, depolarisation: 0.0279, groundAlbedo: 0.1, altitudeM: 0 };
  * const twilight = prepareTwilight({ ...air, orders: "single" });
- * twilightStokes(twilight, { sunZenithDeg: 94, viewZenithDeg: 0, relativeAzimuthDeg: 0 })[1]; // => -1
+ * twilightStokes(twilight, { sunZenithDeg: 94, viewZenithDeg: 0, relativeAzimuthDeg: 0 })[1]; // => -8.355e-5
  */
 export function twilightStokes(twilight: PreparedTwilight, direction: TwilightDirection): Stokes {
   checkPrepared(twilight?.dipole, "prepareTwilight", "twilight", "twilightStokes");
