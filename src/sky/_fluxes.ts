@@ -1,6 +1,7 @@
 /** Fluxes of a solved mode 0 at every boundary of its stack. */
 import { evenGlow, fieldFlux } from "./_ground.js";
-import { bottomField, type Stack, type StackField, topField } from "./_stack.js";
+import type { Stack, StackField } from "./_stack.js";
+import { bottomField, topField } from "./_stackEnds.js";
 
 /** Diffuse fluxes at the boundaries, from the top down. */
 export interface DiffuseFluxes {

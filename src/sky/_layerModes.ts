@@ -1,8 +1,8 @@
 /** The eigenmodes of one homogeneous layer in one azimuth mode. */
 import { expm1 } from "../_numeric.js";
 import { choleskyFactor } from "./_cholesky.js";
+import { decayModes } from "./_decayModes.js";
 import type { ModeKernel } from "./_kernel.js";
-import { rankOneDowndate } from "./_secular.js";
 
 /** Single-scattering albedos up to this count as none: what they scatter is below every stated accuracy. */
 const DARK = 1e-10;
@@ -59,79 +59,6 @@ export function layerModes(kernel: ModeKernel, depth: number, albedo: number): L
     evenFactor: choleskyFactor(overlap, even, size),
     oddFactor: choleskyFactor(overlap, odd, size),
   };
-}
-
-/** What the eigenproblem of a layer gives. */
-interface DecayModes {
-  readonly values: Float64Array;
-  readonly vectors: Float64Array;
-  readonly first: Float64Array;
-  readonly second: Float64Array;
-}
-
-/** Eigensystem of diag(1 / cosine²) - 2 albedo (first firstᵀ + second secondᵀ) / cosines: one outer product after the other. */
-function decayModes(kernel: ModeKernel, albedo: number): DecayModes {
-  const { size, secants, rank } = kernel;
-  if (albedo === 0) return darkModes(secants);
-  const count = size / rank;
-  const scale = Math.sqrt(2 * albedo);
-  const poles = new Float64Array(count);
-  const vector = new Float64Array(count);
-  for (let i = 0; i < count; i++) {
-    poles[i] = secants[i]! * secants[i]!;
-    vector[i] = scale * kernel.first[i]! * secants[i]!;
-  }
-  const { values, vectors, couplings } = rankOneDowndate(poles, vector);
-  for (let i = 0; i < count; i++) couplings[i]! /= scale;
-  const once = { values, vectors, first: couplings, second: new Float64Array(count) };
-  return rank === 1 ? once : secondDowndate(kernel, scale, poles, once);
-}
-
-/** The second outer product of mode 0, in the basis the first one left: its vectors, and the bare second components between them. */
-function secondDowndate(
-  kernel: ModeKernel,
-  scale: number,
-  nodePoles: Float64Array,
-  before: DecayModes,
-): DecayModes {
-  const { size, secants } = kernel;
-  const count = size / 2;
-  const poles = new Float64Array(size);
-  const vector = new Float64Array(size);
-  for (let i = 0; i < count; i++) {
-    poles[2 * i] = before.values[i]!;
-    poles[2 * i + 1] = nodePoles[i]!;
-    let sum = 0;
-    for (let j = 0; j < count; j++) {
-      sum += before.vectors[i * count + j]! * kernel.second[j]! * secants[j]!;
-    }
-    vector[2 * i] = scale * sum;
-    vector[2 * i + 1] = scale * kernel.second[count + i]! * secants[i]!;
-  }
-  const { values, vectors: turned, couplings } = rankOneDowndate(poles, vector);
-  const vectors = new Float64Array(size * size);
-  const first = new Float64Array(size);
-  const second = new Float64Array(size);
-  for (let m = 0; m < size; m++) {
-    const row = m * size;
-    second[m] = couplings[m]! / scale;
-    for (let i = 0; i < count; i++) {
-      const part = turned[row + 2 * i]!;
-      first[m]! += part * before.first[i]!;
-      for (let j = 0; j < count; j++) vectors[row + j]! += part * before.vectors[i * count + j]!;
-      vectors[row + count + i] = turned[row + 2 * i + 1]!;
-    }
-  }
-  return { values, vectors, first, second };
-}
-
-/** Without scattering every node is a mode of its own, and what it would give a source does not matter. */
-function darkModes(secants: Float64Array): DecayModes {
-  const size = secants.length;
-  const none = new Float64Array(size);
-  const vectors = new Float64Array(size * size);
-  for (let i = 0; i < size; i++) vectors[i * size + i] = 1;
-  return { values: secants.map((secant) => secant * secant), vectors, first: none, second: none };
 }
 
 /** Eigenvectors' overlaps weighted by 1 / cosine; the lower triangle is filled. */

@@ -7,6 +7,12 @@ import { RAY_TOP_M } from "./_rays.js";
 export const HEIGHTS = 16;
 /** Sun angles: every 12° to 84°, every 1° from there to 110°. */
 export const ANGLES = 34;
+/** Grid points: heights times angles. */
+export const NODES = 544;
+/** Tensor components of all grid points, four to each. */
+export const TENSORS = 2176;
+/** Unknowns: the tensors, then the diffuse irradiance of the ground under each sun. */
+export const UNKNOWNS = 2210;
 const COARSE_DEG = 12;
 const COARSE = 7;
 const FINE_FROM_DEG = 84;
