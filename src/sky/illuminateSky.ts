@@ -22,7 +22,7 @@ export interface LitSky {
   readonly diffuseFluxes: Float64Array;
   /** Flux upward at each boundary. */
   readonly upwardFluxes: Float64Array;
-  /** Internal: the solution of the three azimuth modes. */
+  /** The solution of the three azimuth modes. @internal */
   readonly modes: readonly [LitStack, LitStack, LitStack];
 }
 

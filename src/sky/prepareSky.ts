@@ -35,13 +35,13 @@ export interface PreparedSky {
   readonly groundAlbedo: Fraction;
   /** Share of light the air sends back down of what the ground sends up evenly. */
   readonly sphericalAlbedo: Fraction;
-  /** Internal: for each boundary its number when layers without depth are left out. */
+  /** For each boundary its number when layers without depth are left out. @internal */
   readonly solvedBoundaries: readonly number[];
-  /** Internal: the three azimuth modes. */
+  /** The three azimuth modes. @internal */
   readonly stacks: readonly [Stack, Stack, Stack];
-  /** Internal: the field of a ground of radiance 1 under a dark sky. */
+  /** The field of a ground of radiance 1 under a dark sky. @internal */
   readonly glow: StackField;
-  /** Internal: the fluxes of that field. */
+  /** The fluxes of that field. @internal */
   readonly glowFluxes: DiffuseFluxes;
 }
 

@@ -28,11 +28,11 @@ export interface TwilightInput {
 export interface PreparedTwilight extends TwilightInput {
   /** Share of scattering that keeps the pattern of a small dipole. */
   readonly dipole: Fraction;
-  /** Internal: profiles and optical depths of rays. */
+  /** Profiles and optical depths of rays. @internal */
   readonly shells: ShellSky;
-  /** Internal: points of the integral along a line of sight. */
+  /** Points of the integral along a line of sight. @internal */
   readonly nodes: Nodes;
-  /** Internal: the light of higher orders; undefined for single scattering. */
+  /** The light of higher orders; undefined for single scattering. @internal */
   readonly higher: HigherOrders | undefined;
 }
 
