@@ -11,6 +11,7 @@ export default {
   entryPoints: ["../src/units.ts", "../src/constants.ts", ...rooms],
   out: "../.docs",
   readme: "../README.md",
+  projectDocuments: ["../examples/guides/*.md"],
   tsconfig: "./tsconfig.docs.json",
   favicon: "./favicon.svg",
   plugin: ["./typedocSections.mjs"],

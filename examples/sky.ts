@@ -49,8 +49,8 @@ for (const [w, wavelengthNm] of grid.entries()) {
 const xyz = spectraToXyz(spectra, grid, cie1931Observer);
 const luminances = Array.from({ length: count }, (_, k) => xyz[3 * k + 1]!);
 const brightest = luminances.reduce((most, y) => Math.max(most, y), 0);
-// half of the brightest: the rim comes out a little overexposed, as in any photograph that shows the zenith
-const white = Math.ceil(brightest / 2000) * 1000;
+// what is as bright as white keeps its colour only if nothing is brighter
+const white = Math.ceil(brightest / 1000) * 1000;
 savePicture(paintColour(dome, xyz, white, sun), out("sky-colour.png"));
 
 domeStokes(POLARISATION_NM, dome, SITE, sun, stokes);

@@ -64,8 +64,7 @@ async function paint() {
     const height = wanted;
     const start = performance.now();
     const xyz = spectraToXyz(await radiances(90 - height), grid, cie1931Observer5nm);
-    const white =
-      xyz.reduce((most, value, k) => (k % 3 === 1 ? Math.max(most, value) : most), 0) / 2;
+    const white = xyz.reduce((most, value, k) => (k % 3 === 1 ? Math.max(most, value) : most), 0);
     const context = canvas.getContext("2d");
     const image = context.createImageData(size, size);
     dots.forEach((dot, k) => {

@@ -34,11 +34,13 @@ export type Stokes = [number, number, number];
  * vibration turned from that plane counter-clockwise by up to 90°, as seen by someone whom the light meets:
  *
  * ```text
- *          up                 Q > 0: |    Q < 0: --
- *           |   . U > 0       U > 0: vibration along the dotted line, from lower right to upper left
- *       .   |   .             as the observer, facing the light, sees it
- *         . | .
- *   ------- o -------         o is the light coming towards the observer
+ *    .      |
+ *      .    |        Q > 0: a vibration along |      U > 0: one along the dots
+ *        .  |        Q < 0: one along --             U < 0: one square to them
+ *    ------ o ------
+ *           |  .     o: light that comes towards the observer
+ *           |    .
+ *           |      .
  * ```
  *
  * Validity: as `prepareSky`.
