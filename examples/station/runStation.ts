@@ -4,6 +4,7 @@ import { analyseStation } from "./analyseStation.js";
 import { ASSUMED_WORDS } from "./assumed.js";
 import { budgetTable } from "./budgetedReading.js";
 import { buildReport, summaryWords } from "./buildReport.js";
+import { skyTable } from "./clearSky.js";
 import { drawPictures } from "./drawPictures.js";
 import { evidenceTable } from "./evidence.js";
 import { standalone } from "./plotting.js";
@@ -28,7 +29,15 @@ export function runStation(
   print(result.station.station);
   if (result.station.about !== "") print(result.station.about);
   print(`\n${summaryWords(result)}\n`);
-  const tables = [calibrationTable, aerosolTable, cloudTable, budgetTable, sunTable, evidenceTable];
+  const tables = [
+    calibrationTable,
+    aerosolTable,
+    cloudTable,
+    budgetTable,
+    sunTable,
+    skyTable,
+    evidenceTable,
+  ];
   for (const table of tables) print(`${tableAsText(table(result))}\n`);
   print(`${ASSUMED_WORDS}\n`);
   print("Cautions");
