@@ -1,5 +1,8 @@
 /** Roots of the equation whose solutions are the eigenvalues of a diagonal matrix less one outer product. */
 
+/** Relative length of a step after which the next would be below rounding: Newton's steps square it. */
+const SETTLED = 1e-10;
+
 /** The root between poles m - 1 and m as its distance from pole `origin`, one of the two: Newton's steps kept between shrinking bounds. */
 export function secularRoot(
   poles: Float64Array,
@@ -22,7 +25,7 @@ export function secularRoot(
     if (!(next >= low && next <= high)) next = 0.5 * (low + high);
     const move = Math.abs(next - shift);
     shift = next;
-    if (move <= 3e-16 * Math.abs(shift)) break;
+    if (move <= SETTLED * Math.abs(shift)) break;
   }
   return shift;
 }
@@ -39,7 +42,8 @@ export function reducedSecular(
   let sum = 1;
   let slope = 0;
   for (let j = 0; j < poles.length; j++) {
-    if (j === m || j === m - 1) continue;
+    if (j === m) continue;
+    if (j === m - 1) continue;
     const over = vector[j]! / (poles[j]! - base - shift);
     sum -= over * vector[j]!;
     slope -= over * over;

@@ -53,6 +53,7 @@ describe("rayleighPhaseMode", () => {
           const total = new Array(9).fill(0);
           for (const order of [0, 1, 2] as const) {
             const mode = rayleighPhaseMode(order, out, from, rho);
+            expect(mode.length).toBe(9);
             for (let k = 0; k < 9; k++) {
               const mixed = (Math.floor(k / 3) === 2) !== (k % 3 === 2);
               total[k] +=
