@@ -8,10 +8,10 @@ const rooms = Object.keys(packageJson.exports)
 
 export default {
   name: "Airlight",
-  entryPoints: ["../src/units.ts", "../src/constants.ts", ...rooms],
+  entryPoints: ["../src/units.ts", "../src/constants.ts", "../src/budget.ts", ...rooms],
   out: "../.docs",
   readme: "../README.md",
-  projectDocuments: ["../examples/guides/*.md"],
+  projectDocuments: ["../examples/paths/air-masses.md", "../examples/sky/sky.md"],
   tsconfig: "./tsconfig.docs.json",
   favicon: "./favicon.svg",
   plugin: ["./typedocSections.mjs"],

@@ -8,7 +8,7 @@ import { skyTable } from "./clearSky.js";
 import { drawPictures } from "./drawPictures.js";
 import { evidenceTable } from "./evidence.js";
 import { standalone } from "./plotting.js";
-import { aerosolTable, calibrationTable, cloudTable, sunTable } from "./resultTables.js";
+import { aerosolTable, calibrationTable, cloudTable, pathTable, sunTable } from "./resultTables.js";
 import { tableAsText } from "./table.js";
 import { CAUTIONS } from "./words.js";
 import { writeOutput } from "./writeOutput.js";
@@ -34,6 +34,7 @@ export function runStation(
     aerosolTable,
     cloudTable,
     budgetTable,
+    pathTable,
     sunTable,
     skyTable,
     evidenceTable,
