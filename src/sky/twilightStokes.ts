@@ -23,8 +23,8 @@ export interface TwilightDirection {
  *
  * Model: sunlight scattered once, integrated along the line of sight from where it leaves the Earth's shadow; plus, if
  * prepared for all orders, what air lit by all other light sends. Which solution to use: `skyStokes` (flat layers) while
- * the sun and the sight are above 10°, this one below. They agree within 1 % at the zenith for suns to 75° from the
- * vertical and within 2 % for sights to 75° and suns to 70°; at a sun of 80° the flat layers are 2 to 4 % too bright.
+ * the sun and the sight are more than 10° above the horizon, this one below. For suns to 70° from the vertical the two
+ * agree within 1 % at sights of 10° and within 2 % at 60°; at sights of 80° the flat layers are 1.5 to 5 % too bright.
  * Validity: suns 0 to 96° from the vertical, sights down to the horizon. Straight rays: within a degree of the horizon
  * the sun's refraction (half a degree) matters more than anything stated here; pass the true, not the apparent, zenith
  * angle of the sun.
