@@ -11,7 +11,7 @@ export default {
   entryPoints: ["../src/units.ts", "../src/constants.ts", "../src/budget.ts", ...rooms],
   out: "../.docs",
   readme: "../README.md",
-  projectDocuments: ["../examples/paths/air-masses.md"],
+  projectDocuments: ["../examples/paths/air-masses.md", "../examples/sky/sky.md"],
   tsconfig: "./tsconfig.docs.json",
   favicon: "./favicon.svg",
   plugin: ["./typedocSections.mjs"],
