@@ -43,11 +43,15 @@ export function markdownBlocks(path: string, text: string): Block[] {
   );
 }
 
+/** The Markdown pages: those at the top and those of the documentation. */
+export function pagePaths(): string[] {
+  return [...filesUnder("", ".md", false), ...filesUnder("docs", ".md")];
+}
+
 /** Every block of the project. */
 export function allBlocks(): Block[] {
   const sources = filesUnder("src", ".ts").flatMap((path) => commentBlocks(path, textOf(path)));
-  const pages = filesUnder("", ".md", false).flatMap((path) => markdownBlocks(path, textOf(path)));
-  return [...sources, ...pages];
+  return [...sources, ...pagePaths().flatMap((path) => markdownBlocks(path, textOf(path)))];
 }
 
 /** What is wrong with the imports of a block: it must import from the package, and name other packages in a comment "// npm install x". */

@@ -1,8 +1,10 @@
 /**
  * Imports every block of a folder in turn and prints, as one line of JSON at the end, what went wrong in each.
  * node _runBlocks.mjs (in the folder that holds blocks.json and the blocks); Deno runs it too.
+ * A block may put a picture into the page's element "#picture": each finds a fresh one.
  */
 import { readFileSync } from "node:fs";
+import { parseHTML } from "linkedom";
 import { difference, parsePrinted } from "./_printed.mjs";
 
 const ids = JSON.parse(readFileSync(new URL("./blocks.json", import.meta.url), "utf8"));
@@ -19,10 +21,12 @@ globalThis.checkPrinted = (line, text, actual) => {
 console.log = () => {};
 
 for (const id of ids) {
-  current = { checked: 0, errors: [] };
+  current = { checked: 0, errors: [], picture: "" };
   results[id] = current;
+  globalThis.document = parseHTML('<html><body><div id="picture"></div></body></html>').document;
   try {
     await import(`./${id}.mjs`);
+    current.picture = document.querySelector("#picture").innerHTML;
   } catch (error) {
     current.errors.push(
       String(error?.stack ?? error)

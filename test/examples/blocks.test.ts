@@ -1,5 +1,4 @@
-import { execFileSync } from "node:child_process";
-import { copyFileSync, mkdirSync, rmSync, writeFileSync } from "node:fs";
+import { writeFileSync } from "node:fs";
 import ts from "typescript";
 import { describe, expect, it } from "vitest";
 import { ROOT } from "../_source.js";
@@ -12,40 +11,17 @@ import {
   markdownBlocks,
   plainImports,
 } from "./_blocks.js";
-
-interface Result {
-  checked: number;
-  errors: string[];
-}
+import { runBlocks } from "./_results.js";
 
 const FOLDER = `${ROOT}.cache/examples/`;
 
-/** Writes the blocks as modules, runs them in one process against dist, and returns what each found wrong. */
-function runBlocks(blocks: readonly Block[]): Record<string, Result> {
-  rmSync(FOLDER, { recursive: true, force: true });
-  mkdirSync(FOLDER, { recursive: true });
-  for (const { id, code } of blocks) {
-    let script: string;
-    try {
-      script = executable(code);
-    } catch (error) {
-      script = `throw new Error(${JSON.stringify((error as Error).message)});`;
-    }
-    writeFileSync(`${FOLDER}${id}.mjs`, script);
-    // "export {}" makes a module of it
-    writeFileSync(`${FOLDER}${id}.ts`, `${plainImports(code)}\nexport {};\n`);
-  }
-  writeFileSync(`${FOLDER}blocks.json`, JSON.stringify(blocks.map((block) => block.id)));
-  for (const file of ["_printed.mjs", "_runBlocks.mjs"])
-    copyFileSync(`${ROOT}test/examples/${file}`, FOLDER + file);
-  const output = execFileSync(process.execPath, [`${FOLDER}_runBlocks.mjs`], { encoding: "utf8" });
-  return JSON.parse(output.trimEnd().split("\n").at(-1)!);
-}
-
 /** Errors of the compiler, by file. */
 function typeErrors(blocks: readonly Block[]): Map<string, string[]> {
+  // a package without types of its own
+  writeFileSync(`${FOLDER}untyped.d.ts`, 'declare module "culori";\n');
+  const files = blocks.map((block) => `${FOLDER}${block.id}.ts`);
   const program = ts.createProgram(
-    blocks.map((block) => `${FOLDER}${block.id}.ts`),
+    [...files, `${FOLDER}untyped.d.ts`],
     {
       target: ts.ScriptTarget.ES2022,
       module: ts.ModuleKind.NodeNext,
@@ -66,7 +42,7 @@ function typeErrors(blocks: readonly Block[]): Map<string, string[]> {
 }
 
 const blocks = allBlocks();
-const results = runBlocks(blocks);
+const results = runBlocks(blocks, FOLDER);
 const types = typeErrors(blocks);
 
 describe("every block a reader can copy", () => {
@@ -84,6 +60,8 @@ describe("every block a reader can copy", () => {
       expect(types.get(id) ?? []).toEqual([]);
       expect(results[id]!.errors).toEqual([]);
       if (where.startsWith("src/")) expect(results[id]!.checked).toBeGreaterThan(0);
+      const drawn = code.includes('"#picture"');
+      expect(results[id]!.picture).toMatch(drawn ? /<svg[^>]* aria-label="[^"]{40,}"/ : /^$/);
     },
   );
 });
