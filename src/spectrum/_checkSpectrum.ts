@@ -1,16 +1,20 @@
 /** Guards of sampled spectra and of lists of wavelengths. */
-import { checkList, checkRecord, refuse } from "../_check.js";
+import { checkList, refuse } from "../_check.js";
 import type { Spectrum } from "./spectrum.js";
 
 /** Throws unless `spectrum` holds two lists of the same length, two points or more, with wavelengths that rise. */
 export function checkSpectrum(spectrum: Spectrum, argument: string, functionName: string): void {
-  checkRecord(spectrum, argument, functionName);
-  const { wavelengthsNm, values } = spectrum;
-  checkRising(wavelengthsNm, 2, `${argument}.wavelengthsNm`, functionName);
-  checkList(values, 2, `${argument}.values`, functionName);
-  if (values.length === wavelengthsNm.length) return;
-  throw new RangeError(
-    `${functionName}: ${argument}.values must be as many as its wavelengths (${wavelengthsNm.length}), got ${values.length}`,
+  checkSamples(spectrum, argument, functionName);
+  checkRising(spectrum.wavelengthsNm, 2, `${argument}.wavelengthsNm`, functionName);
+}
+
+/** Throws unless `spectrum` holds two Float64Arrays of one length, two points or more; does not look at the points. */
+export function checkSamples(spectrum: Spectrum, argument: string, functionName: string): void {
+  const { wavelengthsNm, values } = spectrum ?? {};
+  const arrays = wavelengthsNm instanceof Float64Array && values instanceof Float64Array;
+  if (arrays && values.length > 1 && values.length === wavelengthsNm.length) return;
+  throw new TypeError(
+    `${functionName}: ${argument} must hold wavelengthsNm and values, Float64Arrays of one length from 2`,
   );
 }
 
@@ -33,7 +37,7 @@ export function checkRising(
   }
 }
 
-/** Throws unless the spectrum reaches from `fromNm` to `toNm`. */
+/** Throws unless the spectrum, looked at already, reaches from `fromNm` to `toNm`. */
 export function checkCover(
   spectrum: Spectrum,
   fromNm: number,
@@ -42,7 +46,8 @@ export function checkCover(
   functionName: string,
 ): void {
   const { wavelengthsNm } = spectrum;
-  const [first, last] = [wavelengthsNm[0]!, wavelengthsNm[wavelengthsNm.length - 1]!];
+  const first = wavelengthsNm[0]!;
+  const last = wavelengthsNm[wavelengthsNm.length - 1]!;
   if (first <= fromNm && last >= toNm) return;
   throw new RangeError(
     `${functionName}: ${argument} must cover ${fromNm} to ${toNm} nm, got ${first} to ${last} nm`,

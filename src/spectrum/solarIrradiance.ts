@@ -15,11 +15,11 @@ const BANDS = 234;
  * 1000 nm, 20 nm to 2500 nm, 100 nm to 4000 nm: a continuous parabola in each band that keeps the band's mean. Lines
  * narrower than a band are smoothed away.
  * Validity: 280-4000 nm, enforced. Scaled so that the whole Sun gives 1361 W m⁻², of which 1342.75 W m⁻² lie in this range.
- * The sources do not say whether their wavelengths are those of air or vacuum (up to 0.3 nm apart in the visible).
+ * The sources do not say whether their wavelengths are those of air or vacuum (0.1 to 0.3 nm apart from 350 to 1000 nm).
  * Accuracy: every band keeps its mean to 1e-12; sums over 20 nm from 403 to 903 nm within 0.7 % of ASTM G173-03 and 1.1 %
  * of ASTM E490-00a, both scaled to the same total; 3.5 % below 383 nm and 1.8 % beyond 2450 nm, where those two differ
  * by twice as much (tested).
- * Illuminance 132.7 klx, chromaticity x 0.3235, y 0.3326, colour temperature 5929 K (tested).
+ * Illuminance 132.7 klx, chromaticity x 0.3235, y 0.3326, colour temperature 5928 K (tested).
  * Source: mean of ASTM G173-03 and ASTM E490-00a in bands; total IAU 2015 resolution B3.
  *
  * @param wavelengthNm - wavelength, 280 to 4000 nm

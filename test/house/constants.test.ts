@@ -2,7 +2,8 @@ import { readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import * as constants from "../../src/constants.js";
 import * as units from "../../src/units.js";
-import { expectRelative } from "../_tolerance.js";
+import { referenceTable } from "../_referenceTable.js";
+import { expectAbsolute, expectRelative } from "../_tolerance.js";
 
 interface Entry {
   value: number;
@@ -47,8 +48,14 @@ describe("constants", () => {
     expectRelative(constants.FIRST_RADIATION_CONSTANT_RADIANCE, 2 * h * c * c, 5e-16);
     expectRelative(constants.MOLECULES_PER_DOBSON_UNIT, (1e-5 * 101325) / (k * 273.15), 5e-16);
     expectRelative(constants.MEAN_EARTH_RADIUS, (2 * 6378137 + 6356752.3142) / 3, 1e-8); // printed to 0.1 m
-    // 683 lm/W at 540 THz, 555.016 nm in air of index 1.00028; y is 0.9999970 there: 683 / y to its printed digits
-    expectRelative(constants.PEAK_LUMINOUS_EFFICACY, 683.002, 1e-15);
+  });
+
+  it("the peak of luminous efficacy follows from 683 lm/W at 540 THz and the observer's y", () => {
+    const inAir = (constants.SPEED_OF_LIGHT / 540e12 / 1.00028) * 1e9; // 555.016 nm
+    const { wavelength_nm: nm, ybar: y } = referenceTable("cie-1931-2deg-1nm.csv");
+    const i = nm!.indexOf(Math.floor(inAir));
+    const there = y![i]! + (inAir - nm![i]!) * (y![i + 1]! - y![i]!);
+    expectAbsolute(constants.PEAK_LUMINOUS_EFFICACY, 683 / there, 0.0005); // half of its last digit
   });
 });
 
