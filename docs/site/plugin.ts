@@ -1,12 +1,23 @@
 /** What the site adds to TypeDoc: chapters of the rooms, links to functions by name, formulas, a link to the explore page. */
 import { existsSync, readFileSync } from "node:fs";
-import { type Application, Converter, type DeclarationReflection, JSX, PageEvent, ReflectionKind } from "typedoc";
+import {
+  type Application,
+  Converter,
+  type DeclarationReflection,
+  JSX,
+  PageEvent,
+  ReflectionKind,
+} from "typedoc";
 import { ROOT } from "../../test/_source.js";
 
 /** Text a chapter starts with, from docs/rooms. */
 function chapterOf(room: string): string | undefined {
   const path = `${ROOT}docs/rooms/${room}.md`;
-  return existsSync(path) ? readFileSync(path, "utf8").replaceAll(/\$\$?[^$]+\$\$?/g, (tex) => tex.replaceAll("{@", "{ @")) : undefined;
+  return existsSync(path)
+    ? readFileSync(path, "utf8").replaceAll(/\$\$?[^$]+\$\$?/g, (tex) =>
+        tex.replaceAll("{@", "{ @"),
+      )
+    : undefined;
 }
 
 /** Hooks the additions into `app`. */
@@ -24,8 +35,8 @@ export function attachSite(app: Application): void {
   });
   app.renderer.on(PageEvent.END, (page) => {
     const up = "../".repeat(page.url.split("/").length - 1);
-    page.contents = page.contents
-      ?.replace(/href="#fn-(\w+)"/g, (_, name) => {
+    page.contents = (page.contents ?? "")
+      .replace(/href="#fn-(\w+)"/g, (_, name) => {
         const target = pages.get(name);
         if (target === undefined) throw new Error(`${page.url}: there is no function ${name}`);
         return `href="${up}${target}"`;
@@ -36,7 +47,11 @@ export function attachSite(app: Application): void {
     JSX.createElement(
       "p",
       { class: "airlight-explore" },
-      JSX.createElement("a", { href: context.relativeURL("explore.html") ?? "" }, "Explore with sliders"),
+      JSX.createElement(
+        "a",
+        { href: context.relativeURL("explore.html") ?? "" },
+        "Explore with sliders",
+      ),
     ),
   );
 }

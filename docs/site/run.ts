@@ -112,7 +112,7 @@ function addButton(block: HTMLElement): void {
     button.disabled = true;
     await run(code, script, output);
     button.disabled = false;
-    bar.dataset["ran"] = String(Number(bar.dataset["ran"] ?? 0) + 1);
+    bar.dataset.ran = String(Number(bar.dataset.ran ?? 0) + 1);
   });
   bar.append(button, output);
   block.parentElement.after(bar);

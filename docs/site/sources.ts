@@ -18,7 +18,10 @@ export function sourcesPage(): string {
     for (const work of worksOf(source)) users.set(work, [...(users.get(work) ?? []), name]);
   const rows = [...users]
     .sort(([a], [b]) => a.localeCompare(b, "en"))
-    .map(([work, names]) => `| ${work.replaceAll("|", "\\|")} | ${names.map((n) => `[${n}](#fn-${n})`).join(", ")} |`);
+    .map(
+      ([work, names]) =>
+        `| ${work.replaceAll("|", "\\|")} | ${names.map((n) => `[${n}](#fn-${n})`).join(", ")} |`,
+    );
   return `${textOf("docs/sources.md").trimEnd()}
 
 ## Works, and the functions that follow them

@@ -20,19 +20,16 @@ function typeErrors(blocks: readonly Block[]): Map<string, string[]> {
   // a package without types of its own
   writeFileSync(`${FOLDER}untyped.d.ts`, 'declare module "culori";\n');
   const files = blocks.map((block) => `${FOLDER}${block.id}.ts`);
-  const program = ts.createProgram(
-    [...files, `${FOLDER}untyped.d.ts`],
-    {
-      target: ts.ScriptTarget.ES2022,
-      module: ts.ModuleKind.NodeNext,
-      moduleResolution: ts.ModuleResolutionKind.NodeNext,
-      lib: ["lib.es2022.d.ts", "lib.dom.d.ts"],
-      types: [],
-      strict: true,
-      noEmit: true,
-      skipLibCheck: true,
-    },
-  );
+  const program = ts.createProgram([...files, `${FOLDER}untyped.d.ts`], {
+    target: ts.ScriptTarget.ES2022,
+    module: ts.ModuleKind.NodeNext,
+    moduleResolution: ts.ModuleResolutionKind.NodeNext,
+    lib: ["lib.es2022.d.ts", "lib.dom.d.ts"],
+    types: [],
+    strict: true,
+    noEmit: true,
+    skipLibCheck: true,
+  });
   const errors = new Map<string, string[]>();
   for (const { file, messageText } of ts.getPreEmitDiagnostics(program)) {
     const id = file?.fileName.slice(FOLDER.length, -3) ?? "";
