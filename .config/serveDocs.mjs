@@ -1,4 +1,4 @@
-/** Serves the built documentation on localhost: node .config/serveDocs.mjs [port]. */
+/** Serves the built documentation on localhost: node .config/serveDocs.mjs [port, 8080; 0 for any]. */
 import { createReadStream, statSync } from "node:fs";
 import { createServer } from "node:http";
 import { extname, join, normalize, sep } from "node:path";
@@ -26,7 +26,7 @@ function fileOf(requestPath) {
 }
 
 const port = Number(process.argv[2] ?? 8080);
-createServer((request, response) => {
+const server = createServer((request, response) => {
   let file;
   try {
     file = fileOf(new URL(request.url, "http://localhost").pathname);
@@ -39,6 +39,11 @@ createServer((request, response) => {
   }
   response.writeHead(200, { "content-type": TYPES[extname(file)] ?? "application/octet-stream" });
   createReadStream(file).pipe(response);
-}).listen(port, "127.0.0.1", () => {
-  console.log(`Documentation on http://localhost:${port}/ (Ctrl-C ends)`);
+});
+server.on("error", (error) => {
+  console.error(error.code === "EADDRINUSE" ? `port ${port} is taken: name another` : error.message);
+  process.exitCode = 1;
+});
+server.listen(port, "127.0.0.1", () => {
+  console.log(`Documentation on http://localhost:${server.address().port}/ (Ctrl-C ends)`);
 });

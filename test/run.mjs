@@ -1,6 +1,7 @@
 /**
  * Runs every check of the project, one line each, and prints the closing count.
- * node test/run.mjs            all steps
+ * node test/run.mjs            all steps but those on demand
+ * node test/run.mjs --all      those too (they fetch something)
  * node test/run.mjs unit docs  only the named ones (dist must be built for those that need it)
  * Steps made of tests count their tests; the others count one each.
  */
@@ -59,12 +60,14 @@ const STEPS = [
     needs: ["build"],
     only: "examples/station.ts",
   },
+  { name: "nodes", command: ["node", "test/package/nodes.mjs"], needs: ["build"], onDemand: true },
   { name: "nudge", command: ["tsx", "test/nudge/run.ts"], needs: ["unit"] },
 ];
 
 /** Runs a command of node_modules/.bin; resolves to its exit code and everything it printed. */
 function run([command, ...args]) {
-  const child = spawn(`${ROOT}node_modules/.bin/${command}`, args, {
+  const program = command === "node" ? process.execPath : `${ROOT}node_modules/.bin/${command}`;
+  const child = spawn(program, args, {
     cwd: ROOT,
     env: { ...process.env, NO_COLOR: "1", FORCE_COLOR: "0" },
   });
@@ -90,7 +93,9 @@ function count(step, code) {
   return { passed, failed: silent ? 1 : failed, skipped };
 }
 
-const wanted = process.argv.slice(2);
+const args = process.argv.slice(2);
+const all = args.includes("--all");
+const wanted = args.filter((arg) => arg !== "--all");
 const unknown = wanted.filter((name) => !STEPS.some((step) => step.name === name));
 if (unknown.length > 0) {
   console.error(
@@ -104,7 +109,8 @@ mkdirSync(RESULTS, { recursive: true });
 const failures = [];
 const total = { passed: 0, failed: 0 };
 for (const step of STEPS) {
-  if (wanted.length > 0 && !wanted.includes(step.name)) continue;
+  const chosen = wanted.length > 0 ? wanted.includes(step.name) : all || !step.onDemand;
+  if (!chosen) continue;
   const name = step.name.padEnd(10);
   const missing = (step.needs ?? []).find((need) => failures.includes(need));
   if (step.only !== undefined && !existsSync(ROOT + step.only)) {

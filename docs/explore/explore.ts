@@ -35,7 +35,7 @@ function update(): void {
   drawSpectrum(element("#spectrum"), fixed.outside, view.ground);
   const rows = numbersOf(view).flatMap(([term, value]) => [cell("dt", term), cell("dd", value)]);
   element("#numbers").replaceChildren(...rows);
-  element("#code").textContent = codeFor(state, view);
+  element<HTMLTextAreaElement>("#code").value = codeFor(state, view);
 }
 
 function cell(tag: "dt" | "dd", text: string): HTMLElement {
@@ -68,7 +68,7 @@ addEventListener("hashchange", () => {
   update();
 });
 element("#copy").addEventListener("click", async () => {
-  await navigator.clipboard.writeText(element("#code").textContent ?? "");
+  await navigator.clipboard.writeText(element<HTMLTextAreaElement>("#code").value);
   element("#copied").textContent = "copied";
 });
 readAddress();

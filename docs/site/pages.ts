@@ -1,20 +1,8 @@
 /** The Markdown pages as TypeDoc gets them: with the pictures their blocks make. */
 import { mkdirSync, writeFileSync } from "node:fs";
 import { dirname } from "node:path";
-import { type Block, markdownBlocks } from "../../test/examples/_blocks.js";
-import type { BlockResult } from "../../test/examples/_results.js";
+import { type Block, type BlockResult, markdownBlocks } from "../../test/examples/_blocks.js";
 import { filesUnder, textOf } from "../../test/_source.js";
-
-/** Pages of the site, in the order of its menu. */
-export const PAGES: readonly string[] = [
-  "guides/ground-spectrum.md",
-  "guides/photometer.md",
-  "guides/sunset.md",
-  "guides/telescope.md",
-  "guides/display-colour.md",
-  "guides/own-atmosphere.md",
-  "guides/trust.md",
-];
 
 /** Blocks of all pages under docs. */
 export function pageBlocks(): Block[] {

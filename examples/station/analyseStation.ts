@@ -1,7 +1,7 @@
 /** The whole job on numbers: station folder in, results out; nothing is written. */
 import { type Calibration, calibrate } from "./calibrate.js";
 import { channelOptics } from "./channelOptics.js";
-import { inputError } from "./inputError.js";
+import { blaming, inputError } from "./inputError.js";
 import {
   SUN_HEIGHTS_DEG,
   type SunView,
@@ -41,20 +41,22 @@ export function analyseStation(folder: string): StationResult {
   const measuredDay = load(station.measurementFile); // before any work: all input errors come first
   const channels = station.channels.map((channel) => channelOptics(channel, station));
   const calibrations = calibrate(channels, calibrationDay, station.calibrationFile);
-  const aerosol = retrieveAerosol(calibrations, measuredDay);
+  const measured = { file: station.measurementFile };
+  const aerosol = blaming(measured, () => retrieveAerosol(calibrations, measuredDay));
   const air = typicalAir(aerosol);
   if (air === undefined) {
     const what = "no reading is free of cloud with an aerosol depth above 0 in every channel";
-    throw inputError({ file: station.measurementFile }, what);
+    throw inputError(measured, what);
   }
+  const view = (height: number): SunView => blaming(measured, () => viewSun(height, air, station));
   return {
     station,
     calibrationDay,
     calibrations,
     aerosol,
     air,
-    views: SUN_HEIGHTS_DEG.map((height) => viewSun(height, air, station)),
-    strip: stripHeights().map((height) => viewSun(height, air, station)),
+    views: SUN_HEIGHTS_DEG.map(view),
+    strip: stripHeights().map(view),
   };
 }
 

@@ -12,9 +12,8 @@ import type { Xyz } from "./triples.js";
  * observer's printed scale, which is that of standard air: the shift to vacuum, at most 1e-4 in x and y, is left out.
  * Validity: the spectrum must cover 400 to 700 nm; what is missing beyond its ends counts as zero. A NaN among the
  * samples that are used gives NaN. A table of one's own works as an observer; its contents are not looked at.
- * Accuracy: white points A, D50 and D65 to 1e-5 in x and y: by the 5 nm sum of 380-780 nm as the CIE prints them (D65
- * 0.31272, 0.32903), by the 1 nm sum of 360-830 nm as in the tables of its data files (0.31273, 0.32902) (tested). Fastest
- * when the spectrum's wavelengths are the observer's own; for many spectra on one grid take `spectraToXyz`.
+ * Accuracy: white points A, D50 and D65 to 1e-5 in x and y: by the 5 nm sum of 380-780 nm (D65 0.31272, 0.32903, as
+ * the CIE prints it) and by the 1 nm sum of 360-830 nm (0.31273, 0.32902) (tested). Fastest when the spectrum's wavelengths are the observer's own; for many spectra on one grid take `spectraToXyz`.
  * Source: CIE 15, tristimulus values; 683.002 lm/W from CIE 018.
  *
  * @param spectrum - irradiance (W m⁻² nm⁻¹), radiance (W m⁻² sr⁻¹ nm⁻¹) or a relative spectrum

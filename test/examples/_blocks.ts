@@ -1,7 +1,8 @@
 /** Code blocks of the comments and of the Markdown files, made into modules that check the values they print. */
+import { copyFileSync, mkdirSync, rmSync, writeFileSync } from "node:fs";
 import ts from "typescript";
 import { commentOf } from "../house/_rules.js";
-import { filesUnder, textOf, treeOf, walk } from "../_source.js";
+import { filesUnder, ROOT, textOf, treeOf, walk } from "../_source.js";
 
 /** A block of code a reader can copy. */
 export interface Block {
@@ -10,6 +11,14 @@ export interface Block {
   /** Name for a file made of it. */
   readonly id: string;
   readonly code: string;
+}
+
+/** What running a block found. */
+export interface BlockResult {
+  readonly checked: number;
+  readonly errors: string[];
+  /** Markup of the picture the block put into the element "#picture"; empty if none. */
+  readonly picture: string;
 }
 
 const block = (path: string, line: number, code: string): Block => ({
@@ -108,4 +117,29 @@ function printedExpression(node: ts.Node): ts.Expression | undefined {
   const call = node.expression;
   const logs = ts.isCallExpression(call) && call.expression.getText() === "console.log";
   return logs && call.arguments.length === 1 ? call.arguments[0] : call;
+}
+
+/** Makes `folder` (ending in a slash) hold the blocks as they are (.ts), as scripts (.mjs), and _runBlocks.mjs that runs them. */
+export function writeBlocks(folder: string, blocks: readonly Block[]): void {
+  rmSync(folder, { recursive: true, force: true });
+  mkdirSync(folder, { recursive: true });
+  for (const { id, code } of blocks) {
+    let script: string;
+    try {
+      script = executable(code);
+    } catch (error) {
+      script = `throw new Error(${JSON.stringify((error as Error).message)});`;
+    }
+    writeFileSync(`${folder}${id}.mjs`, script);
+    // "export {}" makes a module of it
+    writeFileSync(`${folder}${id}.ts`, `${plainImports(code)}\nexport {};\n`);
+  }
+  writeFileSync(`${folder}blocks.json`, JSON.stringify(blocks.map((block) => block.id)));
+  for (const file of ["_printed.mjs", "_runBlocks.mjs"])
+    copyFileSync(`${ROOT}test/examples/${file}`, folder + file);
+}
+
+/** What _runBlocks.mjs printed in its last line. */
+export function resultsOf(output: string): Record<string, BlockResult> {
+  return JSON.parse(output.trimEnd().split("\n").at(-1)!);
 }

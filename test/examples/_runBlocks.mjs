@@ -1,13 +1,13 @@
 /**
- * Imports every block of a folder in turn and prints, as one line of JSON at the end, what went wrong in each.
+ * Imports every block of a folder in turn and prints, as its last line, in JSON, what went wrong in each.
  * node _runBlocks.mjs (in the folder that holds blocks.json and the blocks); Deno runs it too.
- * A block may put a picture into the page's element "#picture": each finds a fresh one.
+ * A block may put a picture into the page's element "#picture": each finds a fresh one, where linkedom is installed.
  */
 import { readFileSync } from "node:fs";
-import { parseHTML } from "linkedom";
 import { difference, parsePrinted } from "./_printed.mjs";
 
 const ids = JSON.parse(readFileSync(new URL("./blocks.json", import.meta.url), "utf8"));
+const { parseHTML } = await import("linkedom").catch(() => ({}));
 const results = {};
 let current;
 
@@ -18,15 +18,17 @@ globalThis.checkPrinted = (line, text, actual) => {
   if (wrong !== undefined) current.errors.push(`line ${line}: ${wrong}`);
   return actual;
 };
+const print = console.log;
 console.log = () => {};
 
 for (const id of ids) {
   current = { checked: 0, errors: [], picture: "" };
   results[id] = current;
-  globalThis.document = parseHTML('<html><body><div id="picture"></div></body></html>').document;
+  const document = parseHTML?.('<html><body><div id="picture"></div></body></html>').document;
+  globalThis.document = document;
   try {
     await import(`./${id}.mjs`);
-    current.picture = document.querySelector("#picture").innerHTML;
+    current.picture = document?.querySelector("#picture").innerHTML ?? "";
   } catch (error) {
     current.errors.push(
       String(error?.stack ?? error)
@@ -36,4 +38,4 @@ for (const id of ids) {
     );
   }
 }
-process.stdout.write(`\n${JSON.stringify(results)}\n`);
+print(JSON.stringify(results));

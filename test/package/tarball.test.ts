@@ -2,6 +2,7 @@ import { spawnSync } from "node:child_process";
 import { readFileSync, statSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
 import { describe, expect, inject, it } from "vitest";
+import { allBlocks, resultsOf, writeBlocks } from "../examples/_blocks.js";
 import { filesUnder, ROOT, textOf } from "../_source.js";
 
 const consumer = inject("consumer");
@@ -53,7 +54,14 @@ describe("the packed tarball", () => {
   });
 
   it("has types that resolve (attw)", () => {
-    const { code, output } = run(bin("attw"), [tarball, "--profile", "esm-only", "--no-emoji"]);
+    const { code, output } = run(bin("attw"), [
+      tarball,
+      "--profile",
+      "esm-only",
+      "--no-emoji",
+      "--format",
+      "ascii",
+    ]);
     expect(code, output).toBe(0);
     // once for Node's ESM, once for bundlers, per code path of package.json
     expect(output.match(/from ESM\): OK \(ESM\)/g)).toHaveLength(paths.length);
@@ -158,6 +166,19 @@ export const equal: boolean = n === same(633, air);
     expect(checked.code, checked.output).toBe(0);
     write("check.ts", consumerCode.replace("(633, air)", '("633", air)'));
     expect(run(bin("deno"), ["check", ...flags, "check.ts"]).code).not.toBe(0);
+  });
+});
+
+describe("the code blocks of comments and pages", () => {
+  it("run in Deno too, from the installed package", () => {
+    const folder = `${join(consumer, "blocks")}/`;
+    const blocks = allBlocks().filter(({ code }) => !code.includes("// npm install"));
+    writeBlocks(folder, blocks);
+    const flags = ["--cached-only", "--node-modules-dir=manual", "--allow-read"];
+    const { output } = run(bin("deno"), ["run", "--no-check", ...flags, "blocks/_runBlocks.mjs"]);
+    const wrong = Object.entries(resultsOf(output)).filter(([, { errors }]) => errors.length > 0);
+    expect(Object.keys(resultsOf(output))).toHaveLength(blocks.length);
+    expect(wrong).toEqual([]);
   });
 });
 
