@@ -95,9 +95,16 @@ async function run(code: string, script: string, output: HTMLElement): Promise<v
   }
 }
 
+/** The code of a block: TypeDoc ends its lines with <br>. */
+function codeOf(block: HTMLElement): string {
+  const copy = block.cloneNode(true) as HTMLElement;
+  for (const end of copy.querySelectorAll("br")) end.replaceWith("\n");
+  return (copy.textContent ?? "").trim();
+}
+
 /** Puts the button under a block. */
 function addButton(block: HTMLElement): void {
-  const code = (block.textContent ?? "").trim();
+  const code = codeOf(block);
   const script = SCRIPTS[code];
   if (script === undefined || block.parentElement === null) return;
   const bar = document.createElement("div");
