@@ -1,7 +1,7 @@
 /** The spectrum outside the air and at the ground as an SVG. */
 import type { Spectrum } from "airlight";
 
-const [LEFT, RIGHT, TOP, BOTTOM] = [46, 628, 12, 262];
+const [LEFT, RIGHT, TOP, BOTTOM] = [46, 612, 12, 258];
 const MOST = 2.2; // W m⁻² nm⁻¹ at the top
 
 const x = (nm: number): number => LEFT + ((nm - 300) / 800) * (RIGHT - LEFT);
@@ -23,7 +23,7 @@ function axes(): string {
     (value) =>
       `<line class="axis" x1="${LEFT}" x2="${RIGHT}" y1="${y(value)}" y2="${y(value)}"/><text x="${LEFT - 8}" y="${y(value) + 5}" text-anchor="end">${value}</text>`,
   );
-  return `${up.join("")}${along.join("")}<text x="${RIGHT}" y="298" text-anchor="end">wavelength, nm; height: W m⁻² nm⁻¹</text>`;
+  return `${up.join("")}${along.join("")}<text x="${RIGHT}" y="296" text-anchor="end">wavelength, nm; height: W m⁻² nm⁻¹</text>`;
 }
 
 /** Draws both spectra. The frame is drawn once, the curves at every call. */

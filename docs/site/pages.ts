@@ -15,6 +15,9 @@ function figure(picture: string): string {
   return `<figure class="airlight-picture">${svg}</figure>`;
 }
 
+/** Where a page wants its picture instead. */
+const PLACE = "<!-- picture -->";
+
 /** The text of a page with a picture after each block that makes one. */
 export function withPictures(path: string, results: Record<string, BlockResult>): string {
   let text = textOf(path);
@@ -22,6 +25,10 @@ export function withPictures(path: string, results: Record<string, BlockResult>)
     const { picture = "", errors = [] } = results[id] ?? {};
     if (errors.length > 0) throw new Error(`${path}: ${errors.join("; ")}`);
     if (picture === "") continue;
+    if (text.includes(PLACE)) {
+      text = text.replace(PLACE, figure(picture));
+      continue;
+    }
     const end = text.indexOf("\n```", text.indexOf(code)) + 4;
     text = `${text.slice(0, end)}\n\n${figure(picture)}\n${text.slice(end)}`;
   }

@@ -17,7 +17,8 @@ export function quantitiesPage(): string {
         return `| ${[...cells, ...[returns, validity, accuracy, source].map(cell)].join(" | ")} |`;
       });
     const head = "| quantity | function | gives | range | accuracy measured | source |";
-    return `## ${room}\n\n${head}\n|---|---|---|---|---|---|\n${rows.join("\n")}`;
+    const table = `${head}\n|---|---|---|---|---|---|\n${rows.join("\n")}`;
+    return `## ${room}\n\n<div class="airlight-quantities">\n\n${table}\n\n</div>`;
   });
   return `---
 title: Quantities

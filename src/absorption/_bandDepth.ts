@@ -1,5 +1,5 @@
 /** Optical depth of saturating bands, Bird & Riordan 1986 (formulas from memory), without guards. */
-import { exp, log1p } from "../_numeric.js";
+import { exp, log } from "../_numeric.js";
 import {
   BAND_WAVELENGTHS_NM,
   MIXED_GAS_COEFFICIENTS,
@@ -26,12 +26,12 @@ export function mixedGasCoefficientOf(wavelengthNm: number): number {
 
 /** Slant depth of water vapour; x is coefficient times slant water in cm. */
 export function waterDepthOf(x: number): number {
-  return WATER_LINEAR * x * exp(EXPONENT * log1p(WATER_SATURATION * x));
+  return WATER_LINEAR * x * exp(EXPONENT * log(1 + WATER_SATURATION * x));
 }
 
 /** Slant depth of mixed gases; x is coefficient times pressure-corrected air mass. */
 export function mixedGasDepthOf(x: number): number {
-  return MIXED_LINEAR * x * exp(EXPONENT * log1p(MIXED_SATURATION * x));
+  return MIXED_LINEAR * x * exp(EXPONENT * log(1 + MIXED_SATURATION * x));
 }
 
 function between(table: readonly number[], wavelengthNm: number): number {

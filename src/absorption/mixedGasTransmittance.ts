@@ -11,8 +11,8 @@ import { mixedGasCoefficientOf, mixedGasDepthOf } from "./_bandDepth.js";
  * Validity: 300-4000 nm, air mass 0 to 100, enforced; carbon dioxide of the year of the paper (about 345 ppm, common
  * knowledge). The coefficients stand at 122 wavelengths with straight lines between them: oxygen's narrow band at 760 nm reaches from
  * 757.5 to 780 nm so, where its true edge is near 770 nm.
- * Accuracy: the formula as printed; transmittance at the centre of the 760 nm band is 0.24 above the direct spectrum of ASTM G173
- * in the same narrow band, elsewhere some per cent.
+ * Accuracy: 1e-12 of the formula. The formula itself, found when the table was compiled: 0.24 above the direct spectrum of ASTM G173
+ * at the centre of the 760 nm band, elsewhere some per cent; 0.03 of false depth at 778 nm at air mass 1, where the air is clear.
  * Source: Bird & Riordan 1986, J. Clim. Appl. Meteorol. 25, 87, after Leckner 1978 (from memory).
  *
  * @param wavelengthNm - wavelength, 300 to 4000 nm

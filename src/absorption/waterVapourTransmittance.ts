@@ -11,8 +11,8 @@ import { waterCoefficientOf, waterDepthOf } from "./_bandDepth.js";
  * water absorbs less than twice as much, so the law of Bouguer does not hold.
  * Validity: 300-4000 nm, slant water 0 to 2000 cm, enforced. The coefficients stand at 122 wavelengths with straight lines between
  * them, which spreads the edge of a band over the window beside it (570-610 and 656-690 nm, for instance).
- * Accuracy: the formula as printed; some per cent of transmittance in the bands (0.05 rms over all rows against the direct
- * spectrum of ASTM G173), coefficients below 0.01 plausible only.
+ * Accuracy: 1e-12 of the formula. The formula itself: some per cent of transmittance in the bands (0.05 rms over all rows against
+ * the direct spectrum of ASTM G173, found when the table was compiled); coefficients below 0.01 are plausible only.
  * Source: Bird & Riordan 1986, J. Clim. Appl. Meteorol. 25, 87 (from memory).
  *
  * @param wavelengthNm - wavelength, 300 to 4000 nm

@@ -8,7 +8,7 @@ import type { Chromaticity, Xyz } from "./triples.js";
  *
  * Model: x = X / (X + Y + Z), y = Y / (X + Y + Z).
  * Validity: the sum must be positive: black has no chromaticity. NaN among X, Y, Z gives NaN.
- * Accuracy: 4e-16 relative, rounding of a sum and a division (tested).
+ * Accuracy: 1e-15, rounding of a sum and a division (tested).
  * Source: CIE 15, chromaticity coordinates.
  *
  * @param xyz - [X, Y, Z] in any common unit

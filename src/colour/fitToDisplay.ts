@@ -10,7 +10,7 @@ import type { Rgb } from "./triples.js";
  * exceeds 1, all three are scaled so that the largest is 1. Hue is kept in the linear sense; saturation, and then
  * brightness, give way. Colours already within 0 to 1 stay as they are.
  * Validity: luminance must not be negative (no light has that). NaN gives NaN in all three.
- * Accuracy: luminance is kept to 1e-14 where nothing exceeds 1 (tested).
+ * Accuracy: luminance is kept to 1e-13 where nothing exceeds 1 (tested).
  * Source: arithmetic; the luminance weights are those of `linearSrgbToXyz`.
  *
  * @param linear - [red, green, blue], linear, of any size

@@ -1,8 +1,7 @@
 /** Optical depth of a nitrogen dioxide column. */
-import { nitrogenDioxideOf } from "../absorption/_nitrogenDioxide.js";
 import { checkNumber } from "../_check.js";
-import { MOLECULES_PER_DOBSON_UNIT } from "../constants.js";
 import type { Dimensionless, DobsonUnits, Kelvins, Nanometres } from "../units.js";
+import { nitrogenDioxideDepthOf } from "./_gasDepth.js";
 
 /**
  * Vertical optical depth of a column of nitrogen dioxide.
@@ -30,5 +29,5 @@ export function nitrogenDioxideOpticalDepth(
   checkNumber(wavelengthNm, 280, 660, "nm", "wavelengthNm", "nitrogenDioxideOpticalDepth");
   checkNumber(columnDu, 0, 50, "DU", "columnDu", "nitrogenDioxideOpticalDepth");
   checkNumber(temperatureK, 200, 298, "K", "temperatureK", "nitrogenDioxideOpticalDepth");
-  return nitrogenDioxideOf(wavelengthNm, temperatureK) * columnDu * MOLECULES_PER_DOBSON_UNIT;
+  return nitrogenDioxideDepthOf(wavelengthNm, columnDu, temperatureK);
 }

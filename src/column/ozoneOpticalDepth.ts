@@ -1,8 +1,7 @@
 /** Optical depth of an ozone column. */
-import { ozoneOf } from "../absorption/_ozone.js";
 import { checkNumber } from "../_check.js";
-import { MOLECULES_PER_DOBSON_UNIT } from "../constants.js";
 import type { Dimensionless, DobsonUnits, Kelvins, Nanometres } from "../units.js";
+import { ozoneDepthOf } from "./_gasDepth.js";
 
 /**
  * Vertical optical depth of a column of ozone.
@@ -29,5 +28,5 @@ export function ozoneOpticalDepth(
   checkNumber(wavelengthNm, 186, 1098, "nm", "wavelengthNm", "ozoneOpticalDepth");
   checkNumber(ozoneDu, 0, 1000, "DU", "ozoneDu", "ozoneOpticalDepth");
   checkNumber(temperatureK, 200, 298, "K", "temperatureK", "ozoneOpticalDepth");
-  return ozoneOf(wavelengthNm, temperatureK) * ozoneDu * MOLECULES_PER_DOBSON_UNIT;
+  return ozoneDepthOf(wavelengthNm, ozoneDu, temperatureK);
 }

@@ -1,20 +1,16 @@
 /** Guards of sampled spectra and of lists of wavelengths. */
-import { checkList, refuse } from "../_check.js";
+import { checkList, checkRecord, refuse } from "../_check.js";
 import type { Spectrum } from "./spectrum.js";
 
 /** Throws unless `spectrum` holds two lists of the same length, two points or more, with wavelengths that rise. */
 export function checkSpectrum(spectrum: Spectrum, argument: string, functionName: string): void {
-  checkSamples(spectrum, argument, functionName);
-  checkRising(spectrum.wavelengthsNm, 2, `${argument}.wavelengthsNm`, functionName);
-}
-
-/** Throws unless `spectrum` holds two Float64Arrays of one length, two points or more; does not look at the points. */
-export function checkSamples(spectrum: Spectrum, argument: string, functionName: string): void {
-  const { wavelengthsNm, values } = spectrum ?? {};
-  const arrays = wavelengthsNm instanceof Float64Array && values instanceof Float64Array;
-  if (arrays && values.length > 1 && values.length === wavelengthsNm.length) return;
-  throw new TypeError(
-    `${functionName}: ${argument} must hold wavelengthsNm and values, Float64Arrays of one length from 2`,
+  checkRecord(spectrum, argument, functionName);
+  const { wavelengthsNm, values } = spectrum;
+  checkRising(wavelengthsNm, 2, `${argument}.wavelengthsNm`, functionName);
+  checkList(values, 2, `${argument}.values`, functionName);
+  if (values.length === wavelengthsNm.length) return;
+  throw new RangeError(
+    `${functionName}: ${argument}.values must be as many as its wavelengths (${wavelengthsNm.length}), got ${values.length}`,
   );
 }
 

@@ -3,7 +3,7 @@ import { describe, expect, it } from "vitest";
 import { mixedGasTransmittance, waterVapourTransmittance } from "../../src/index.js";
 import { between } from "../_generators.js";
 import { referenceTable } from "../_referenceTable.js";
-import { expectRefusal, expectRelative } from "../_tolerance.js";
+import { expectAbsolute, expectRefusal, expectRelative } from "../_tolerance.js";
 
 const table = referenceTable("absorption-bird-riordan-1986.csv") as Record<string, number[]>;
 /** Bird & Riordan 1986, written with the power operator. */
@@ -31,6 +31,9 @@ describe("independent fixtures", () => {
   // 4 x 1.5 = 6, 1 + 118.93 x 6 = 714.58, ^0.45 = 19.24, depth 0.4396
   it("absorbs 36 % at 762.5 nm at air mass 1.5", () => {
     expectRelative(mixedGasTransmittance(762.5, 1.5), Math.exp(-0.4397), 2e-4); // four digits carried
+  });
+  it("puts 0.03 of false depth at 778 nm, beside the oxygen band", () => {
+    expectAbsolute(-Math.log(mixedGasTransmittance(778, 1)), 0.03, 0.005);
   });
   it("takes the coefficient, not the transmittance, as a straight line between rows", () => {
     // 942.5 nm lies half way between 937 (55) and 948 (45)

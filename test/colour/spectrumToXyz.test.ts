@@ -5,6 +5,7 @@ import {
   cie1931Observer,
   cie1931Observer5nm,
   cie1964Observer,
+  correlatedColourTemperature,
   daylightIlluminant,
   type Observer,
   planckRadiance,
@@ -16,6 +17,11 @@ import {
   tabulate,
   wavelengthGrid,
 } from "../../src/index.js";
+import {
+  FIRST_COMPONENT,
+  MEAN_COMPONENT,
+  SECOND_COMPONENT,
+} from "../../src/colour/_daylightComponents.js";
 import { between } from "../_generators.js";
 import { referenceTable } from "../_referenceTable.js";
 import { expectAbsolute, expectRefusal, expectRelative } from "../_tolerance.js";
@@ -322,6 +328,35 @@ describe("daylightIlluminant", () => {
       }),
     );
   });
+  it("embeds the components as printed", () => {
+    const printed = referenceTable("cie-daylight-components-5nm.csv");
+    expect(MEAN_COMPONENT).toEqual(printed.S0);
+    expect(FIRST_COMPONENT).toEqual(printed.S1);
+    expect(SECOND_COMPONENT).toEqual(printed.S2);
+  });
+  it.each([4000, 4500, 5500, 6999, 7001, 8000, 10_000, 15_000, 20_000, 25_000])(
+    "has the colour temperature asked for: %d K",
+    (temperatureK) => {
+      // the published cubics follow the daylight locus to about 4e-4 of the temperature (found here by another way: Planck's law)
+      const xyz = spectrumToXyz(daylightIlluminant(temperatureK), cie1931Observer);
+      const found = correlatedColourTemperature(xyz);
+      expectRelative(found.temperatureK, temperatureK, 5e-4);
+      expectAbsolute(found.duv, 0.003, 5e-4); // daylight lies some 0.003 above the black bodies (common practice)
+    },
+  );
+  it.each([
+    [5000, 0.34567, 0.35851],
+    [5500, 0.33243, 0.34744],
+    [6500, 0.31272, 0.32903],
+    [7500, 0.29903, 0.31488],
+  ])(
+    "D illuminant of nominal %d K: white point as the CIE prints it (5 nm, 380-780)",
+    (nominal, x, y) => {
+      const point = xy(daylightIlluminant((nominal * 1.4388) / 1.438), cie1931Observer5nm);
+      expectAbsolute(point[0], x, 7e-6); // printed to 1e-5
+      expectAbsolute(point[1], y, 7e-6);
+    },
+  );
   it("joins at 7000 K, and takes both ends", () => {
     const [below, above] = [6999.999, 7000.001].map((t) =>
       xy(daylightIlluminant(t), cie1931Observer5nm),

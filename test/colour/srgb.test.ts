@@ -94,6 +94,15 @@ describe("independent fixtures: culori and colorjs.io", () => {
       }),
     );
   });
+  it("takes the same branch close to both joints", () => {
+    for (const c of [
+      0.0031307, 0.0031308, 0.0031309, 0.003132, 0.0404499, 0.04045, 0.0404501, 0.0405,
+    ]) {
+      const grey: Rgb = [c, -c, c];
+      near(encodeSrgb(grey), colorjs("srgb-linear", "srgb", grey), 1e-15);
+      near(decodeSrgb(grey), colorjs("srgb", "srgb-linear", grey), 1e-15);
+    }
+  });
   it("[X, Y, Z] of sunlight goes into either library for any other space: Oklab, 1e-12 apart", () => {
     const [X, Y, Z] = spectrumToXyz(
       tabulate(solarIrradiance, wavelengthGrid(360, 830, 1)),

@@ -11,6 +11,8 @@ export interface Block {
   /** Name for a file made of it. */
   readonly id: string;
   readonly code: string;
+  /** Whether it is TypeScript to the letter; JavaScript leaves types open. */
+  readonly strict: boolean;
 }
 
 /** What running a block found. */
@@ -21,10 +23,11 @@ export interface BlockResult {
   readonly picture: string;
 }
 
-const block = (path: string, line: number, code: string): Block => ({
+const block = (path: string, line: number, code: string, strict = true): Block => ({
   where: `${path}:${line}`,
   id: `${path}-${line}`.replace(/[^\w-]/g, "_"),
   code: code.trimEnd(),
+  strict,
 });
 
 /** The @example blocks of the comments of a source file. */
@@ -48,7 +51,12 @@ export function commentBlocks(path: string, text: string): Block[] {
 export function markdownBlocks(path: string, text: string): Block[] {
   const fence = /^(`{3,})(ts|typescript|js|javascript)\b.*\n([\s\S]*?)^\1[ \t]*$/gm;
   return [...text.matchAll(fence)].map((match) =>
-    block(path, text.slice(0, match.index).split("\n").length, match[3]!),
+    block(
+      path,
+      text.slice(0, match.index).split("\n").length,
+      match[3]!,
+      match[2]!.startsWith("t"),
+    ),
   );
 }
 
