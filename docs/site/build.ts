@@ -2,12 +2,13 @@
  * Builds the documentation into .docs: pages with their pictures, chapters, Run buttons, the explore page.
  * npm run docs (dist must be built). Exit code 1 on any warning.
  */
-import { cpSync, existsSync, readFileSync, rmSync } from "node:fs";
+import { readFileSync, rmSync } from "node:fs";
 import { build } from "esbuild";
 import { Application } from "typedoc";
 import { allBlocks } from "../../test/examples/_blocks.js";
 import { runBlocks } from "../../test/examples/_results.js";
 import { filesUnder, ROOT } from "../../test/_source.js";
+import { writeExplorePage } from "./explorePage.js";
 import { pageBlocks, withPictures, writePage } from "./pages.js";
 import { attachSite } from "./plugin.js";
 import { quantitiesPage } from "./quantities.js";
@@ -40,22 +41,6 @@ async function writeRunScript(): Promise<void> {
   });
 }
 
-/** The explore page: one HTML file with its script beside it. */
-async function writeExplore(): Promise<void> {
-  const folder = `${ROOT}docs/explore/`;
-  if (!existsSync(`${folder}explore.ts`)) return;
-  await build({
-    entryPoints: [`${folder}explore.ts`],
-    outfile: `${OUT}assets/explore.js`,
-    bundle: true,
-    minify: true,
-    format: "esm",
-    target: "es2022",
-  });
-  cpSync(`${folder}explore.html`, `${OUT}explore.html`);
-  cpSync(`${folder}explore.css`, `${OUT}assets/explore.css`);
-}
-
 rmSync(SITE, { recursive: true, force: true });
 writePages();
 await writeRunScript();
@@ -67,7 +52,7 @@ app.validate(project);
 await app.generateOutputs(project);
 const packages = [...new Set(allBlocks().flatMap(({ code }) => packagesOf(code)))];
 await writeModules(packages, `${OUT}assets/modules/`);
-await writeExplore();
+await writeExplorePage(OUT);
 const { name } = JSON.parse(readFileSync(`${ROOT}package.json`, "utf8"));
 console.log(`${name}: ${packages.length} packages for the blocks, site in .docs`);
 process.exitCode = app.logger.hasErrors() || app.logger.hasWarnings() ? 1 : 0;
