@@ -6,6 +6,7 @@ export default defineConfig({
   test: {
     include: ["test/**/*.test.ts"],
     exclude: ["test/package/**", "test/examples/**"],
+    setupFiles: ["test/_seed.ts"],
     environment: "node",
     testTimeout: 60_000,
     coverage: { include: ["src/**"], reporter: ["text"] },

@@ -14,7 +14,7 @@ const MIXED_LINEAR = 1.41;
 const MIXED_SATURATION = 118.93;
 const EXPONENT = -0.45;
 
-/** Coefficient of water vapour, per cm; straight lines between the table's wavelengths, 0 below 300 nm. */
+/** Coefficient of water vapour, per cm; straight lines between the table's wavelengths; 0 below 300 nm too, where both first rows are 0. */
 export function waterCoefficientOf(wavelengthNm: number): number {
   return between(WATER_COEFFICIENTS, wavelengthNm);
 }
@@ -35,7 +35,6 @@ export function mixedGasDepthOf(x: number): number {
 }
 
 function between(table: readonly number[], wavelengthNm: number): number {
-  if (wavelengthNm < BAND_WAVELENGTHS_NM[0]!) return 0;
   const i = lastBelow(BAND_WAVELENGTHS_NM, wavelengthNm);
   const low = BAND_WAVELENGTHS_NM[i]!;
   const t = (wavelengthNm - low) / (BAND_WAVELENGTHS_NM[i + 1]! - low);

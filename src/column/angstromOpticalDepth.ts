@@ -19,7 +19,7 @@ export interface AngstromAerosol {
  * Model: depth at the reference wavelength times (wavelength / reference) to the power of minus the exponent.
  * Validity: 186-4000 nm, depth 0 to 20, exponent -2 to 5, enforced. A description, not a law of nature: real aerosol curves on a
  * double logarithmic plot, more so the further from the reference.
- * Accuracy: 1e-15 of the formula.
+ * Accuracy: 1e-14 of the formula.
  * Source: Ångström 1929, Geogr. Ann. 11, 156.
  *
  * @param wavelengthNm - wavelength, 186 to 4000 nm

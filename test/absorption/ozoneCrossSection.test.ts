@@ -1,5 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
+import { nitrogenDioxideOf } from "../../src/absorption/_nitrogenDioxide.js";
+import { ozoneOf } from "../../src/absorption/_ozone.js";
 import { ozoneCrossSection } from "../../src/index.js";
 import { between } from "../_generators.js";
 import { referenceTable } from "../_referenceTable.js";
@@ -215,6 +217,11 @@ describe("edges", () => {
   it("accepts both ends and holds the first band below its centre", () => {
     expect(cm2(186, 250)).toBe(cm2(186.0505, 250));
     expectRelative(cm2(1098, 250), 1.026 * 1.002e-26, 1e-13);
+  });
+  it("is nothing outside the tables for the functions that carry on there", () => {
+    expect(ozoneOf(1098.1, 225)).toBe(0);
+    expect(nitrogenDioxideOf(279.9, 225)).toBe(0);
+    expect(nitrogenDioxideOf(660.1, 225)).toBe(0);
   });
   it("refuses what lies outside", () => {
     const name = "ozoneCrossSection";

@@ -8,4 +8,29 @@ export interface Equivalent {
   readonly why: string;
 }
 
-export const EQUIVALENT: readonly Equivalent[] = [];
+export const EQUIVALENT: readonly Equivalent[] = [
+  {
+    path: "src/air/airToVacuumWavelength.ts",
+    line: "const ROUNDS = 4",
+    literal: "4",
+    why: "the fixed point has converged to double precision; a fifth round changes nothing",
+  },
+  {
+    path: "src/air/airToVacuumWavelength.ts",
+    line: "for (let i = 0; i < ROUNDS",
+    literal: "0",
+    why: "three rounds already reach the stated accuracy; the fourth is the reserve",
+  },
+  {
+    path: "src/air/_standardLayers.ts",
+    line: "while (layer < 6",
+    literal: "6",
+    why: "beyond the last layer the comparison with the next base is false anyway",
+  },
+  {
+    path: "src/air/_standardLayers.ts",
+    line: "Math.min((altitudeM - 80_000) / 500, 12)",
+    literal: "12",
+    why: "heights end at 86 km, row 12",
+  },
+];

@@ -1,6 +1,6 @@
 /** Runs the tests of one room once per changed literal; the parent ends the process when a change makes a test run forever. */
 import * as vitestExpect from "@vitest/expect";
-import fc from "fast-check";
+import "../_seed.js";
 import { bundleTests, type Register } from "./_bundle.js";
 import type { Nudge } from "./_literals.js";
 
@@ -9,8 +9,10 @@ export interface Job {
   readonly tests: readonly string[];
   readonly nudges: readonly Nudge[];
 }
-/** To the parent. */
+/** To the parent: first `readySeconds`, then one `noticed` per literal. */
 export interface Report {
+  /** How long the tests took unchanged. */
+  readonly readySeconds?: number;
   /** Position in `changed` of the change a test noticed; -1 if none did. */
   readonly noticed?: number;
   /** Why the tests cannot be used: they do not build, or fail unchanged. */
@@ -24,7 +26,6 @@ interface Test {
 
 const { chai, JestAsymmetricMatchers, JestChaiExpect, JestExtend } = vitestExpect;
 for (const plugin of [JestExtend, JestChaiExpect, JestAsymmetricMatchers]) chai.use(plugin);
-fc.configureGlobal({ seed: 20240229 });
 
 /** The tests a bundle registers. */
 function collect(register: Register, changed: number, value: number): Test[] {
@@ -98,7 +99,9 @@ const tell = (report: Report): Promise<void> =>
 
 async function work({ tests, nudges }: Job): Promise<void> {
   const register = await bundleTests(tests, nudges);
+  const start = performance.now();
   const order = await byTime(collect(register, -1, 0));
+  await tell({ readySeconds: (performance.now() - start) / 1000 });
   if (order.length === 0) throw new Error("no tests");
   for (const [n, { changed }] of nudges.entries()) {
     let noticed = -1;
