@@ -60,6 +60,11 @@ const STEPS = [
     needs: ["build"],
     only: "examples/station.ts",
   },
+  {
+    ...vitest("elsewhere", "vitest.package.config.ts", "test/elsewhere"),
+    needs: ["build"],
+    onDemand: true,
+  },
   { name: "nodes", command: ["node", "test/package/nodes.mjs"], needs: ["build"], onDemand: true },
   { name: "nudge", command: ["tsx", "test/nudge/run.ts", "air", "scattering"], needs: ["unit"] },
 ];

@@ -1,0 +1,134 @@
+/** Inputs for every public function: what each engine works out and the tests compare. Plain JavaScript: any engine runs it. */
+
+/** `count` values from `from` to `to`, by exact arithmetic alone. */
+const spread = (from, to, count) =>
+  Array.from({ length: count }, (_, i) => from + ((to - from) * i) / (count - 1));
+
+/** Every pair of two lists, given to `f`. */
+const each = (first, second, f) => first.flatMap((a) => second.map((b) => f(a, b)));
+
+/** By name: a function that returns the results on its grid. `a` is the package. */
+export function gridOf(a) {
+  const nm = spread(301, 1687, 25);
+  const visible = spread(300, 655, 25);
+  const zenith = spread(0, 89.9, 25);
+  const co2 = [300, 425, 1000];
+  const states = each([60000, 101325], [250, 288.15, 310], (pressurePa, temperatureK) =>
+    a.moistAir({ pressurePa, temperatureK, relativeHumidity: 0.6, co2Ppm: 425 }),
+  );
+  const sites = [0, 2500].map((altitudeM) => ({
+    pressurePa: 101325 - altitudeM * 10,
+    altitudeM,
+    latitudeDeg: 46,
+    co2Ppm: 425,
+  }));
+  const column = a.airColumn(sites[0]);
+  const aerosol = { opticalDepth: 0.12, referenceNm: 500, exponent: 1.3 };
+  const air = { ozoneDu: 320, ozoneTemperatureK: 228, ozoneHeightM: 22000, nitrogenDioxideDu: 0.2 };
+  const beam = a.clearBeam({ column, trueZenithDeg: 40, ...air, waterCm: 1.5, aerosol });
+  const grid = a.wavelengthGrid(380, 780, 5);
+  const black = (temperatureK) => a.tabulate((w) => a.planckRadiance(w, temperatureK), grid);
+  const temperatures = spread(1200, 20000, 15);
+  const xyzs = temperatures.map((t) => {
+    const [X, Y, Z] = a.spectrumToXyz(black(t), a.cie1931Observer5nm);
+    return [X / Y, 1, Z / Y];
+  });
+  const rgbs = each(spread(-0.2, 1.3, 9), [0.001, 0.4, 1], (r, b) => [r, 0.5, b]);
+  const masses = spread(1.5, 6, 20);
+  const wiggle = (i) => 1 + (((i * 7) % 11) - 5) * 1e-4;
+  const surface = { pressurePa: 95000, temperatureK: 280 };
+  return {
+    airColumn: () => sites.map(a.airColumn),
+    airColumnBodhaine: () => sites.map(a.airColumnBodhaine),
+    airDensity: () => states.map(a.airDensity),
+    airMassKastenWater: () => zenith.map(a.airMassKastenWater),
+    airMassKastenYoung: () => zenith.map(a.airMassKastenYoung),
+    airMassShell: () =>
+      zenith.map((z) => a.airMassShell(z, { shellHeightM: 22000, altitudeM: 500 })),
+    airMassYoung: () => zenith.map(a.airMassYoung),
+    airNumberDensity: () => states.map(a.airNumberDensity),
+    airToVacuumWavelength: () => each(nm, states, a.airToVacuumWavelength),
+    angstromFit: () => [a.angstromFit([440, 500, 675, 870], [0.091, 0.0768, 0.0517, 0.0372])],
+    angstromOpticalDepth: () => nm.map((w) => a.angstromOpticalDepth(w, aerosol)),
+    bandMean: () => temperatures.map((t) => a.bandMean(black(t), a.gaussianPassband(550, 10))),
+    beamAt: () => zenith.map((z) => a.beamAt(beam, z).masses),
+    beamIrradiance: () => nm.map((w) => a.beamIrradiance(w, beam, 1.01)),
+    beamOpticalDepths: () => nm.map((w) => a.beamOpticalDepths(w, beam)),
+    beamTable: () => [a.beamTable(nm, beam)],
+    beamTransmittance: () => nm.map((w) => a.beamTransmittance(w, beam)),
+    beamTransmittances: () => [a.beamTransmittances(a.beamTable(nm, beam), a.beamAt(beam, 75))],
+    chromaticity: () => xyzs.map(a.chromaticity),
+    clearBeam: () => [beam],
+    // off the locus: on it Duv is the rounding error itself
+    correlatedColourTemperature: () =>
+      xyzs.map(([X, Y, Z]) => a.correlatedColourTemperature([0.98 * X, Y, Z])),
+    daylightIlluminant: () => spread(4000, 25000, 8).map(a.daylightIlluminant),
+    decodeSrgb: () => rgbs.map(a.decodeSrgb),
+    depolarisation: () => each(nm, co2, a.depolarisation),
+    encodeSrgb: () => rgbs.map(a.encodeSrgb),
+    fitToDisplay: () => rgbs.map(a.fitToDisplay),
+    gaussianPassband: () => [a.gaussianPassband(550, 10)],
+    gravity: () => each(spread(-90, 90, 13), [0, 8000], a.gravity),
+    groupIndexCiddor: () => each(nm, states, a.groupIndexCiddor),
+    integrateSpectrum: () => temperatures.map((t) => a.integrateSpectrum(black(t), 403, 702)),
+    kingFactor: () => each(nm, co2, a.kingFactor),
+    langleyFit: () => [
+      a.langleyFit({
+        airMasses: masses,
+        signals: masses.map((m, i) => (2 - 0.1 * m) * wiggle(i)),
+      }),
+    ],
+    linearSrgbToXyz: () => rgbs.map(a.linearSrgbToXyz),
+    mixedGasTransmittance: () => each(nm, [0.5, 1, 10], a.mixedGasTransmittance),
+    moistAir: () => states,
+    nitrogenDioxideCrossSection: () => each(visible, [225, 290], a.nitrogenDioxideCrossSection),
+    nitrogenDioxideOpticalDepth: () =>
+      visible.map((w) => a.nitrogenDioxideOpticalDepth(w, 0.3, 240)),
+    ozoneCrossSection: () => each(visible, [205, 228, 290], a.ozoneCrossSection),
+    ozoneOpticalDepth: () => visible.map((w) => a.ozoneOpticalDepth(w, 320, 228)),
+    planckRadiance: () => each(nm, temperatures, a.planckRadiance),
+    rayleighCrossSection: () => each(nm, co2, a.rayleighCrossSection),
+    rayleighOpticalDepth: () => nm.map((w) => a.rayleighOpticalDepth(w, column)),
+    rayleighPhase: () => each(spread(0, 180, 19), [0, 0.03], a.rayleighPhase),
+    rayleighPolarisation: () => each(spread(0, 180, 19), [0, 0.03], a.rayleighPolarisation),
+    rayleighScatteringCoefficient: () => each(nm, states, a.rayleighScatteringCoefficient),
+    refractionBennett: () => zenith.map((z) => a.refractionBennett(z, surface)),
+    refractionSaemundsson: () => zenith.map((z) => a.refractionSaemundsson(z, surface)),
+    refractiveIndexBirchDowns: () => each(nm.slice(2), states, a.refractiveIndexBirchDowns),
+    refractiveIndexCiddor: () => each(nm, states, a.refractiveIndexCiddor),
+    refractiveIndexEdlen: () => each(nm.slice(2), states, a.refractiveIndexEdlen),
+    refractiveIndexPeckReeder: () => nm.map(a.refractiveIndexPeckReeder),
+    resampleSpectrum: () => [a.resampleSpectrum(black(3000), spread(401, 699, 20))],
+    residualOpticalDepth: () =>
+      spread(0.2, 1.9, 12).map((signal) =>
+        a.residualOpticalDepth(signal, 2, {
+          terms: [{ opticalDepth: 0.02, airMass: 1.5 }],
+          airMass: 1.6,
+        }),
+      ),
+    solarIrradiance: () => spread(280, 4000, 60).map(a.solarIrradiance),
+    spectraToXyz: () => [a.spectraToXyz(black(3000).values, grid, a.cie1931Observer5nm)],
+    spectrumToXyz: () => [a.spectrumToXyz(black(3000), a.cie1931Observer)],
+    srgbHex: () => [parseInt(a.srgbHex([0.2, 0.4, 0.6]).slice(1), 16)],
+    standardAtmosphere: () => spread(-5000, 86000, 40).map(a.standardAtmosphere),
+    tabulate: () => [black(5772)],
+    vacuumToAirWavelength: () => each(nm, states, a.vacuumToAirWavelength),
+    waterVapourTransmittance: () => each(nm, [0.1, 1, 8], a.waterVapourTransmittance),
+    wavelengthGrid: () => [grid],
+    xyzToLinearSrgb: () => xyzs.map(a.xyzToLinearSrgb),
+  };
+}
+
+/** The numbers in a result, whatever its shape. */
+function numbersIn(value) {
+  if (typeof value === "number") return [value];
+  if (typeof value !== "object" || value === null) return [];
+  return Array.from(ArrayBuffer.isView(value) ? value : Object.values(value)).flatMap(numbersIn);
+}
+
+/** By name: every number the functions give, as text that keeps all bits. */
+export function resultsOf(a) {
+  return Object.fromEntries(
+    Object.entries(gridOf(a)).map(([name, results]) => [name, numbersIn(results()).map(String)]),
+  );
+}
