@@ -92,8 +92,12 @@ function count(step, code) {
   if (!existsSync(step.report)) return { passed: 0, failed: 1 };
   const report = JSON.parse(readFileSync(step.report, "utf8"));
   const skipped = report.numPendingTests + report.numTodoTests;
-  const [passed, failed] = [report.numPassedTests, report.numFailedTests];
-  // a file that does not load, an error between tests or an empty run fails without any failed test
+  const dead = report.testResults.filter(
+    (file) => file.status === "failed" && !file.assertionResults.some((a) => a.status === "failed"),
+  ).length; // files that do not load
+  const passed = report.numPassedTests;
+  const failed = report.numFailedTests + dead;
+  // an error between tests or an empty run fails without any failed test
   const silent = failed === 0 && (code !== 0 || passed === 0);
   return { passed, failed: silent ? 1 : failed, skipped };
 }

@@ -9,10 +9,12 @@ import {
   typicalAir,
   viewSun,
 } from "./lookForward.js";
+import { nearestTo500 } from "./nearestTo500.js";
 import { type PlacedReading, placeReadings } from "./placeReadings.js";
 import { readReadings } from "./readReadings.js";
 import { readStation, type Station } from "./readStation.js";
 import { type AerosolPoint, retrieveAerosol } from "./retrieveAerosol.js";
+import { type ViewUncertainty, viewUncertainty } from "./viewUncertainty.js";
 
 /** Everything the report tells. */
 export interface StationResult {
@@ -24,6 +26,8 @@ export interface StationResult {
   readonly air: TypicalAir;
   /** The sun at SUN_HEIGHTS_DEG. */
   readonly views: readonly SunView[];
+  /** What is known of them, in the same order. */
+  readonly viewUncertainties: readonly ViewUncertainty[];
   /** The sun at many heights, for the strip of colours, from the highest of SUN_HEIGHTS_DEG to the lowest. */
   readonly strip: readonly SunView[];
 }
@@ -42,20 +46,26 @@ export function analyseStation(folder: string): StationResult {
   const channels = station.channels.map((channel) => channelOptics(channel, station));
   const calibrations = calibrate(channels, calibrationDay, station.calibrationFile);
   const measured = { file: station.measurementFile };
-  const aerosol = blaming(measured, () => retrieveAerosol(calibrations, measuredDay));
-  const air = typicalAir(aerosol);
+  const aerosol = blaming(measured, () =>
+    retrieveAerosol(calibrations, measuredDay, station.latitudeDeg),
+  );
+  const air = typicalAir(aerosol, nearestTo500(calibrations));
   if (air === undefined) {
     const what = "no reading is free of cloud with an aerosol depth above 0 in every channel";
     throw inputError(measured, what);
   }
   const view = (height: number): SunView => blaming(measured, () => viewSun(height, air, station));
+  const views = SUN_HEIGHTS_DEG.map(view);
   return {
     station,
     calibrationDay,
     calibrations,
     aerosol,
     air,
-    views: SUN_HEIGHTS_DEG.map(view),
+    views,
+    viewUncertainties: blaming(measured, () =>
+      views.map((seen) => viewUncertainty(seen, air, station)),
+    ),
     strip: stripHeights().map(view),
   };
 }

@@ -1,16 +1,12 @@
 /** One HTML page that needs nothing else. */
 import type { StationResult } from "./analyseStation.js";
+import { ASSUMED_WORDS } from "./assumed.js";
+import { budgetTable } from "./budgetedReading.js";
 import type { Pictures } from "./drawPictures.js";
 import { evidenceTable } from "./evidence.js";
+import { nearestTo500 } from "./nearestTo500.js";
 import { plainColour } from "./plotting.js";
-import {
-  aerosolTable,
-  calibrationTable,
-  clockOf,
-  cloudTable,
-  nearestTo500,
-  sunTable,
-} from "./resultTables.js";
+import { aerosolTable, calibrationTable, clockOf, cloudTable, sunTable } from "./resultTables.js";
 import { escapeHtml, tableAsHtml } from "./table.js";
 import { CAUTIONS, LIMITS, methodWords } from "./words.js";
 
@@ -48,6 +44,10 @@ ${tableAsHtml(aerosolTable(result))}
 ${figure("aerosol-depth", "Optical depth of aerosol in every channel. Shaded: cloudy spells; crosses: their readings, as far as they fit in.")}
 ${figure("aerosol-exponent", "Exponent of the power law through the channels, without the cloudy readings. Fine particles make it large, coarse ones small.")}
 ${tableAsHtml(cloudTable(result))}
+<h2>How well it is known</h2>
+<p>${escapeHtml(ASSUMED_WORDS)}</p>
+${tableAsHtml(budgetTable(result))}
+${figure("budget", "What each line contributes to the standard uncertainty of that reading, and all of them together (the root of the sum of their squares).")}
 <h2>The sun from high to low</h2>
 ${tableAsHtml(sunTable(result))}
 ${figure("sun-spectra", "Direct light on a plane facing the sun, for the median air of the day, at the true heights of the table.")}

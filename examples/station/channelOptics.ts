@@ -20,6 +20,8 @@ export interface ChannelOptics {
   readonly airCrossSections: Float64Array;
   /** Vertical optical depths of ozone. */
   readonly ozoneDepths: Float64Array;
+  /** Columns behind those depths, DU. */
+  readonly columns: { readonly ozoneDu: number; readonly nitrogenDioxideDu: number };
   /** Vertical optical depths of nitrogen dioxide, put at ozone's temperature as the forward calculation does. */
   readonly nitrogenDioxideDepths: Float64Array;
 }
@@ -38,6 +40,7 @@ export function channelOptics(channel: Channel, station: Station): ChannelOptics
     meanNm: weightedMean(band.wavelengthsNm, weights),
     wavelengthsNm: band.wavelengthsNm,
     weights,
+    columns: { ozoneDu, nitrogenDioxideDu },
     airCrossSections: over((nm) => rayleighCrossSection(nm, co2Ppm)),
     ozoneDepths: over((nm) => ozoneOpticalDepth(nm, ozoneDu, ozoneTemperatureK)),
     nitrogenDioxideDepths: over((nm) =>

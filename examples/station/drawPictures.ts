@@ -1,6 +1,8 @@
 /** All pictures of the report. */
 import type { StationResult } from "./analyseStation.js";
 import { drawAerosolDepth, drawExponent } from "./drawAerosol.js";
+import { budgetedReading } from "./budgetedReading.js";
+import { drawBudget } from "./drawBudget.js";
 import { drawCalibrationLines, drawCalibrationResiduals } from "./drawCalibration.js";
 import { drawColourStrip, drawSpectra } from "./drawSun.js";
 import type { PictureWidth } from "./plotting.js";
@@ -13,6 +15,7 @@ export type Pictures = Readonly<
     | "calibration-residuals"
     | "aerosol-depth"
     | "aerosol-exponent"
+    | "budget"
     | "sun-spectra"
     | "sun-colours",
     string
@@ -27,6 +30,7 @@ export function drawPictures(result: StationResult, width: PictureWidth): Pictur
     "calibration-residuals": drawCalibrationResiduals(calibrations, width),
     "aerosol-depth": drawAerosolDepth(aerosol, calibrations, width),
     "aerosol-exponent": drawExponent(aerosol, width),
+    budget: drawBudget(budgetedReading(result), width),
     "sun-spectra": drawSpectra(views, air.distanceAu, width),
     "sun-colours": drawColourStrip(strip, views, width),
   };

@@ -34,6 +34,9 @@ export interface TypicalAir {
   /** Medians over the readings without cloud. */
   readonly turbidity: number;
   readonly exponent: number;
+  /** Standard uncertainties of the depth at 500 nm and of the exponent: medians too, since the largest errors last all day. */
+  readonly depthUncertainty: number;
+  readonly exponentUncertainty: number;
   /** Estimated from the weather at the ground. */
   readonly waterCm: number;
   readonly distanceAu: number;
@@ -54,8 +57,8 @@ export interface SunView {
   readonly displayColour: string;
 }
 
-/** The day as one state of the air; undefined without a reading free of cloud that has a power law. */
-export function typicalAir(points: readonly AerosolPoint[]): TypicalAir | undefined {
+/** The day as one state of the air, `k` the channel nearest 500 nm; undefined without a reading free of cloud that has a power law. */
+export function typicalAir(points: readonly AerosolPoint[], k: number): TypicalAir | undefined {
   const clear = points.filter(({ cloudy, powerLaw }) => !cloudy && powerLaw !== undefined);
   if (clear.length === 0) return undefined;
   const over = (pick: (point: AerosolPoint) => number): number[] => clear.map(pick);
@@ -64,6 +67,8 @@ export function typicalAir(points: readonly AerosolPoint[]): TypicalAir | undefi
     temperatureK: mean(over(({ reading }) => reading.temperatureK)),
     turbidity: median(over(({ powerLaw }) => powerLaw!.turbidity)),
     exponent: median(over(({ powerLaw }) => powerLaw!.exponent)),
+    depthUncertainty: median(over(({ budgets }) => budgets[k]!.standardUncertainty)),
+    exponentUncertainty: median(over((point) => point.powerLawUncertainty!.exponent)),
     waterCm: median(over(({ reading }) => precipitableWaterCm(reading))),
     distanceAu: mean(over(({ reading }) => reading.distanceAu)),
   };

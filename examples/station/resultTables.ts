@@ -1,21 +1,25 @@
 /** The results as tables. */
+import { coverageFactor } from "airlight";
 import type { StationResult } from "./analyseStation.js";
-import { type Calibration, MOST_AIR_MASS } from "./calibrate.js";
+import { ASSUMED } from "./assumed.js";
+import { MOST_AIR_MASS } from "./calibrate.js";
 import { cloudySpells } from "./cloudySpells.js";
+import { constantUncertainty, scatterOf } from "./depthBudget.js";
 import { mean, median } from "./lines.js";
+import { nearestTo500 } from "./nearestTo500.js";
 import type { AerosolPoint } from "./retrieveAerosol.js";
 import type { Table } from "./table.js";
-
-/** Place in the list of channels of the one nearest 500 nm, the customary one for turbidity. */
-export function nearestTo500(calibrations: readonly Calibration[]): number {
-  const gaps = calibrations.map(({ optics }) => Math.abs(optics.channel.centreNm - 500));
-  return gaps.indexOf(Math.min(...gaps));
-}
 
 /** Unit of the signals: what stands before the first comma of `signalUnit`. */
 export function signalUnit({ station }: StationResult): string {
   return station.signalUnit.split(",")[0]!;
 }
+
+/** Half width of a 95 % interval over the standard uncertainty. */
+const FACTOR_95 = coverageFactor(0.95, Number.POSITIVE_INFINITY);
+
+/** Heading of such a half width; its spaces do not break. */
+const PLUS_MINUS = "±\u00a095\u00a0%";
 
 /** Constants and aerosol of the calibration morning. */
 export function calibrationTable(result: StationResult): Table {
@@ -25,25 +29,29 @@ export function calibrationTable(result: StationResult): Table {
     columns: [
       ["channel", "nm"],
       ["constant at 1 au", unit],
-      ["std. error", unit],
-      ["std. error", "%"],
+      [PLUS_MINUS, unit],
+      [PLUS_MINUS, "%"],
+      ["error of the fit", "%"],
       ["aerosol depth", ""],
-      ["std. error", ""],
+      [PLUS_MINUS, ""],
       ["scatter", "%"],
       ["kept", "readings"],
       ["rejected", "readings"],
     ],
-    rows: result.calibrations.map(({ optics, fit, points }) => {
+    rows: result.calibrations.map((calibration) => {
+      const { optics, fit, points } = calibration;
       const kept = points.filter(({ use }) => use === "kept");
-      const scatter = Math.sqrt(mean(kept.map(({ residual }) => residual * residual)));
+      const expanded = FACTOR_95 * constantUncertainty(calibration);
+      const drift = ASSUMED.hazeDrift / mean(kept.map(({ airMass }) => airMass));
       return [
         String(optics.channel.centreNm),
         fit.constant.toFixed(5),
-        fit.constantStandardError.toFixed(5),
+        expanded.toFixed(5),
+        ((expanded / fit.constant) * 100).toFixed(2),
         ((fit.constantStandardError / fit.constant) * 100).toFixed(3),
         fit.opticalDepth.toFixed(4),
-        fit.opticalDepthStandardError.toFixed(5),
-        (scatter * 100).toFixed(3),
+        (FACTOR_95 * Math.hypot(fit.opticalDepthStandardError, drift)).toFixed(4),
+        (scatterOf(calibration) * 100).toFixed(3),
         String(kept.length),
         String(fit.rejected.length),
       ];
@@ -61,8 +69,11 @@ export function aerosolTable({ aerosol, calibrations, station }: StationResult):
       ["hour", "UTC"],
       ["air mass", ""],
       [`depth at ${calibrations[k]!.optics.channel.centreNm} nm`, ""],
+      [PLUS_MINUS, ""],
       ["exponent", ""],
+      [PLUS_MINUS, ""],
       ["turbidity", "at 1000 nm"],
+      [PLUS_MINUS, ""],
       ["clear", "readings"],
       ["cloudy", "readings"],
     ],
@@ -97,27 +108,35 @@ export function cloudTable({ aerosol, calibrations, station }: StationResult): T
 }
 
 /** The sun at several heights. */
-export function sunTable({ views }: StationResult): Table {
+export function sunTable({ views, viewUncertainties }: StationResult): Table {
   return {
     title: "Direct sunlight at the ground, on a plane facing the sun",
     columns: [
       ["true height", "degrees"],
       ["seen height", "degrees"],
       ["illuminance", "lx"],
+      [PLUS_MINUS, "lx"],
       ["colour temp.", "K"],
+      [PLUS_MINUS, "K"],
       ["duv", ""],
       ["x", ""],
       ["y", ""],
+      [PLUS_MINUS, "x, y"],
       ["display", "sRGB"],
     ],
-    rows: views.map((view) => [
+    rows: views.map((view, i) => [
       view.trueHeightDeg.toFixed(0),
       view.apparentHeightDeg.toFixed(2),
       Number(view.illuminanceLx.toPrecision(3)).toFixed(0),
+      Number((FACTOR_95 * viewUncertainties[i]!.illuminanceLx).toPrecision(2)).toFixed(0),
       view.colourTemperature?.temperatureK.toFixed(0) ?? "none",
+      viewUncertainties[i]!.temperatureK === undefined
+        ? "-"
+        : (FACTOR_95 * viewUncertainties[i]!.temperatureK!).toFixed(0),
       view.colourTemperature?.duv.toFixed(4) ?? "none",
       view.chromaticity[0].toFixed(4),
       view.chromaticity[1].toFixed(4),
+      (FACTOR_95 * Math.max(...viewUncertainties[i]!.chromaticity)).toFixed(4),
       view.displayColour,
     ]),
   };
@@ -125,7 +144,9 @@ export function sunTable({ views }: StationResult): Table {
 
 function hourRow(hour: string, points: readonly AerosolPoint[], k: number): string[] {
   const clear = points.filter(({ cloudy }) => !cloudy);
-  const fits = clear.flatMap(({ powerLaw }) => (powerLaw ? [powerLaw] : []));
+  const fits = clear.flatMap(({ powerLaw, powerLawUncertainty: uncertainty }) =>
+    powerLaw && uncertainty ? [{ powerLaw, uncertainty }] : [],
+  );
   const middle = (values: readonly number[], digits: number): string =>
     values.length > 0 ? median(values).toFixed(digits) : "-";
   const pick = (take: (point: AerosolPoint) => number): number[] => clear.map(take);
@@ -140,11 +161,25 @@ function hourRow(hour: string, points: readonly AerosolPoint[], k: number): stri
       4,
     ),
     middle(
-      fits.map(({ exponent }) => exponent),
+      pick(({ budgets }) => budgets[k]!.expandedUncertainty),
+      4,
+    ),
+    middle(
+      fits.map(({ powerLaw }) => powerLaw.exponent),
       2,
     ),
     middle(
-      fits.map(({ turbidity }) => turbidity),
+      fits.map(({ uncertainty }) => FACTOR_95 * uncertainty.exponent),
+      2,
+    ),
+    middle(
+      fits.map(({ powerLaw }) => powerLaw.turbidity),
+      4,
+    ),
+    middle(
+      fits.map(
+        ({ powerLaw, uncertainty }) => FACTOR_95 * uncertainty.turbidity * powerLaw.turbidity,
+      ),
       4,
     ),
     String(clear.length),

@@ -1,6 +1,8 @@
 /** The whole job: read, work out, print, write. */
 import { join, relative } from "node:path";
 import { analyseStation } from "./analyseStation.js";
+import { ASSUMED_WORDS } from "./assumed.js";
+import { budgetTable } from "./budgetedReading.js";
 import { buildReport, summaryWords } from "./buildReport.js";
 import { drawPictures } from "./drawPictures.js";
 import { evidenceTable } from "./evidence.js";
@@ -26,8 +28,9 @@ export function runStation(
   print(result.station.station);
   if (result.station.about !== "") print(result.station.about);
   print(`\n${summaryWords(result)}\n`);
-  const tables = [calibrationTable, aerosolTable, cloudTable, sunTable, evidenceTable];
+  const tables = [calibrationTable, aerosolTable, cloudTable, budgetTable, sunTable, evidenceTable];
   for (const table of tables) print(`${tableAsText(table(result))}\n`);
+  print(`${ASSUMED_WORDS}\n`);
   print("Cautions");
   for (const caution of CAUTIONS) print(`- ${caution}`);
   print("\nWritten");

@@ -36,7 +36,7 @@ export function methodWords({
     ["Cloud", CLOUD_RULE],
     [
       "Aerosol",
-      "Optical depth is what a reading leaves after all known constituents; exponent and turbidity (depth at 1000 nm) come from a power law through the channels. The standard errors are those of scatter: haze that thickened evenly with air mass on the calibration morning would pass unseen.",
+      "Optical depth is what a reading leaves after all known constituents; exponent and turbidity (depth at 1000 nm) come from a power law through the channels. Haze that thickened evenly with air mass on the calibration morning passes unseen there; the uncertainty allows for it.",
     ],
     [
       "Forward",

@@ -251,6 +251,7 @@ describe("good input", () => {
       expect(readdirSync(out).sort()).toEqual([
         "aerosol-depth.svg",
         "aerosol-exponent.svg",
+        "budget.svg",
         "calibration-lines.svg",
         "calibration-residuals.svg",
         "report.html",

@@ -4,6 +4,7 @@ import { analyseStation, type StationResult } from "../../examples/station/analy
 import { airMasses } from "../../examples/station/airMasses.js";
 import { turbidityOf } from "../../examples/station/calibrate.js";
 import { channelOptics } from "../../examples/station/channelOptics.js";
+import { constantUncertainty } from "../../examples/station/depthBudget.js";
 import { knownTerms, NO_AEROSOL } from "../../examples/station/knownTerms.js";
 import { markClouds } from "../../examples/station/markClouds.js";
 import { spreadApart } from "../../examples/station/plotting.js";
@@ -62,6 +63,43 @@ describe("a station of known truth", () => {
     const clear = places.filter(({ cloudDepth }) => cloudDepth < 1e-4);
     expect(clear.length).toBeGreaterThan(90);
     expect(clear.filter(({ cloudy }) => cloudy).length).toBeLessThanOrEqual(3);
+  });
+
+  it("states uncertainties that cover the truth, and whose lines add up", () => {
+    result!.calibrations.forEach((calibration, c) => {
+      const off = Math.abs(calibration.fit.constant - truth.constants[c]!);
+      expect(off).toBeLessThan(1.96 * constantUncertainty(calibration));
+      expectRelative(calibration.fit.constant, truth.constants[c]!, 0.0025);
+    });
+    let [clear, covered] = [0, 0];
+    result!.aerosol.forEach(({ budgets, depths }, i) => {
+      if (made[i]!.cloudDepth >= 1e-3) return;
+      const { expandedUncertainty, opticalDepth, budget, standardUncertainty } = budgets[2]!;
+      expect(opticalDepth).toBe(depths[2]);
+      expectRelative(
+        Math.hypot(...budget.map((row) => row.contribution)),
+        standardUncertainty,
+        1e-12,
+      );
+      expectAbsolute(opticalDepth, made[i]!.depthAt500, 0.004);
+      clear += 1;
+      // cloud of up to 0.001 counts as error
+      if (Math.abs(opticalDepth - made[i]!.depthAt500) <= expandedUncertainty) covered += 1;
+    });
+    expect(clear).toBeGreaterThan(90);
+    expect(covered / clear).toBeGreaterThanOrEqual(0.9);
+  });
+
+  it("propagates the air's uncertainty to light and colour", () => {
+    const { views, viewUncertainties, air } = result!;
+    views.forEach(({ illuminanceLx, trueHeightDeg }, i) => {
+      const relative = viewUncertainties[i]!.illuminanceLx / illuminanceLx;
+      // 1 % of sunlight, and the depth's error over the air mass, about 1 / sin height
+      const depth = air.depthUncertainty / Math.sin((Math.max(5, trueHeightDeg) * Math.PI) / 180);
+      expect(relative).toBeGreaterThan(0.01);
+      expect(relative).toBeLessThan(0.01 + 8 * depth);
+      expect(viewUncertainties[i]!.temperatureK!).toBeGreaterThan(1);
+    });
   });
 
   it("goes forward with the air it found", () => {

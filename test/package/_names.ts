@@ -11,11 +11,11 @@ export interface PublicNames {
 export const PUBLIC_NAMES: Readonly<Record<string, PublicNames>> = {
   "./spectrum": {
     values: {
-      bandMean: 2390,
+      bandMean: 2440,
       gaussianPassband: 6160,
-      integrateSpectrum: 2610,
+      integrateSpectrum: 2670,
       planckRadiance: 1230,
-      resampleSpectrum: 2050,
+      resampleSpectrum: 2110,
       solarIrradiance: 3490,
       tabulate: 1220,
       wavelengthGrid: 1430,
@@ -52,10 +52,10 @@ export const PUBLIC_NAMES: Readonly<Record<string, PublicNames>> = {
   },
   "./absorption": {
     values: {
-      mixedGasTransmittance: 7380,
+      mixedGasTransmittance: 7360,
       nitrogenDioxideCrossSection: 2180,
       ozoneCrossSection: 13080,
-      waterVapourTransmittance: 7430,
+      waterVapourTransmittance: 7400,
     },
     types: [],
   },
@@ -84,16 +84,17 @@ export const PUBLIC_NAMES: Readonly<Record<string, PublicNames>> = {
   "./beam": {
     values: {
       beamAt: 8850,
-      beamIrradiance: 20170,
-      beamOpticalDepths: 17440,
-      beamTable: 18220,
-      beamTransmittance: 17560,
-      beamTransmittances: 20090,
+      beamIrradiance: 20120,
+      beamOpticalDepths: 17380,
+      beamTable: 18420,
+      beamTransmittance: 17500,
+      beamTransmittances: 20300,
       clearBeam: 9790,
     },
     types: [
       "BandRows",
       "Beam",
+      "BeamKernel",
       "BeamMasses",
       "BeamOpticalDepths",
       "BeamState",
@@ -114,7 +115,7 @@ export const PUBLIC_NAMES: Readonly<Record<string, PublicNames>> = {
       fitToDisplay: 1260,
       linearSrgbToXyz: 960,
       spectraToXyz: 2590,
-      spectrumToXyz: 1220,
+      spectrumToXyz: 1110,
       srgbHex: 1670,
       xyzToLinearSrgb: 930,
     },
