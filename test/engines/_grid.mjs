@@ -38,6 +38,8 @@ export function gridOf(a) {
   const wiggle = (i) => 1 + (((i * 7) % 11) - 5) * 1e-4;
   const surface = { pressurePa: 95000, temperatureK: 280 };
   return {
+    ...readingGrid(a, beam),
+    ...uncertaintyGrid(a),
     airColumn: () => sites.map(a.airColumn),
     airColumnBodhaine: () => sites.map(a.airColumnBodhaine),
     airDensity: () => states.map(a.airDensity),
@@ -116,6 +118,162 @@ export function gridOf(a) {
     waterVapourTransmittance: () => each(nm, [0.1, 1, 8], a.waterVapourTransmittance),
     wavelengthGrid: () => [grid],
     xyzToLinearSrgb: () => xyzs.map(a.xyzToLinearSrgb),
+  };
+}
+
+/** Readings and calibrations. */
+function readingGrid(a, beam) {
+  const reading = {
+    ...{ signal: 1.25, signalStandardUncertainty: 0.001, constant: 2, sunDistanceAu: 1.01 },
+    ...{ constantStandardUncertainty: 0.01, airMass: 2, airMassPerDeg: 0.06, terms: [] },
+    zenithStandardUncertaintyDeg: 0.005,
+  };
+  const depths = [reading, { ...reading, constant: 1.8 }].map(a.aerosolOpticalDepth);
+  const three = (x) => Float64Array.of(x, 1.1 * x, 1.2 * x);
+  const readings = {
+    ...{ timesMinutes: Float64Array.of(0, 1, 2), signals: three(1.2), sunDistancesAu: three(0.9) },
+    ...{ pressuresPa: three(80000), ozoneDu: three(280), airMasses: three(2) },
+    ...{ ozoneAirMasses: three(1.9), aerosolAirMasses: three(2.1) },
+  };
+  const green = {
+    ...{ constant: 2, constantRelativeUncertainty: 0.005, signalRelativeUncertainty: 0.001 },
+    ...{ rayleighDepthPerPa: 1.4e-6, ozoneDepthPerDu: 3.2e-5, otherDepth: 0 },
+  };
+  const series = {
+    ...{ pressureRelativeUncertainty: 0.001, ozoneStandardUncertaintyDu: 10 },
+    ...{ zenithStandardUncertaintyDeg: 0.005, screeningChannel: 0, windowMinutes: 4 },
+  };
+  const drift = a.calibrationDrift(
+    [0, 100, 200, 300].map((timeDays, i) => ({
+      timeDays,
+      constant: [2, 1.997, 1.996, 1.993][i],
+      standardUncertainty: 0.004,
+    })),
+  );
+  const masses = spread(1.5, 5, 8);
+  const flat = { wavelengthsNm: Float64Array.of(400, 600), values: Float64Array.of(1, 1.2) };
+  const covariance = Float64Array.of(0.04, 0.01, 0.01, 0.04);
+  const pair = [
+    [306, 1.6e-23, 0.3],
+    [320, 2.4e-24, 0.7],
+  ].map(([wavelengthNm, crossSectionM2, signal]) => ({
+    ...{ wavelengthNm, crossSectionM2, signal, signalStandardUncertainty: 0.001, constant: 1 },
+    ...{ constantStandardUncertainty: 0.002, knownSlantDepth: 0.1 },
+  }));
+  return {
+    aerosolOpticalDepth: () => depths,
+    aerosolOpticalDepths: () => [a.aerosolOpticalDepths(readings, [green], series)],
+    airMassPerDegree: () => [30, 70].map((z) => a.airMassPerDegree(a.airMassKastenYoung, z)),
+    angstromCurvature: () => [
+      a.angstromCurvature([412, 500, 675, 862], [0.19, 0.15, 0.1, 0.074], {
+        covariance: Array.from({ length: 16 }, (_, i) => (i % 5 === 0 ? 1.6e-5 : 1e-6)),
+        referenceNm: 500,
+      }),
+    ],
+    bandTransmittance: () => [
+      a.bandTransmittance(a.gaussianPassband(500, 20), flat, (nm) => 0.5 + 0.01 * (nm - 500)),
+    ],
+    calibrationAt: () => [a.calibrationAt(350, drift)],
+    calibrationDrift: () => [drift],
+    cloudScreening: () => [
+      a.cloudScreening([0, 1, 2, 3, 4, 5], [0.1, 0.1, 0.11, 0.1, 0.2, 0.1], 4),
+    ],
+    combinedCalibration: () => [
+      a.combinedCalibration(
+        [2.01, 2, 1.985, 2.004].map((constant) => ({ constant, constantStandardError: 0.002 })),
+      ),
+    ],
+    extinctionFit: () => [
+      a.extinctionFit(
+        masses.map((airMass, i) => ({
+          ...{ band: "V", magnitude: 10.5 + 0.15 * airMass + 0.003 * (i % 3), airMass },
+          ...{ standardUncertainty: 0.01, catalogueMagnitude: 8, colourIndex: i % 2 },
+        })),
+        { secondOrder: false, colourTerm: false },
+      ),
+    ],
+    magnitudeToOpticalDepth: () => [0.1, 1].map(a.magnitudeToOpticalDepth),
+    modelExtinction: () => [
+      a.modelExtinction({
+        passband: a.gaussianPassband(440, 90),
+        stars: [12000, 4500].map((t, colourIndex) => ({
+          spectrum: a.tabulate((nm) => a.planckRadiance(nm, t), a.wavelengthGrid(200, 700, 5)),
+          colourIndex,
+        })),
+        airMasses: [1, 1.5, 2],
+        opticalDepth: (nm) => 0.1 * (550 / nm) * (550 / nm),
+      }),
+    ],
+    opticalDepthCovariance: () => [a.opticalDepthCovariance(depths, ["zenith angle"])],
+    opticalDepthCriterion: () => [1, 2, 6].map((m) => a.opticalDepthCriterion(m)),
+    opticalDepthToMagnitude: () => [0.1, 1].map(a.opticalDepthToMagnitude),
+    ozoneColumn: () => [
+      a.ozoneColumn(pair, {
+        ...{ sunDistanceAu: 1, ozoneAirMass: 2, ozoneAirMassRelativeUncertainty: 0.001 },
+        ...{ aerosolAirMass: 2, aerosolPowers: [0], knownRelativeUncertainty: 0.001 },
+        crossSectionRelativeUncertainty: 0.01,
+      }),
+    ],
+    precipitableWater: () => [
+      a.precipitableWater({
+        ...{ signal: 0.5, signalStandardUncertainty: 0.0005, constant: 1, sunDistanceAu: 1 },
+        ...{ constantStandardUncertainty: 0.01, airMass: 2, knownSlantDepth: 0.1 },
+        ...{ knownSlantStandardUncertainty: 0.01, bandFactor: 0.55, bandExponent: 0.6 },
+        ...{ bandFactorStandardUncertainty: 0.01, bandExponentStandardUncertainty: 0.01 },
+      }),
+    ],
+    reducedSignals: () => [
+      a.reducedSignals(masses, {
+        sunDistanceAu: 1.01,
+        terms: [{ opticalDepth: 0.1, airMasses: masses }],
+      }),
+    ],
+    removeAtmosphere: () => [
+      a.removeAtmosphere(
+        { wavelengthsNm: Float64Array.of(400, 500), values: Float64Array.of(0.75, 1.18) },
+        beam,
+        {
+          standardUncertainties: [0.01, 0.01],
+          leastTransmittance: 0.01,
+          slantDepthUncertainties: [(nm) => (0.01 * 500) / nm],
+        },
+      ),
+    ],
+    resampleWithCovariance: () => [a.resampleWithCovariance({ ...flat, covariance }, [450, 475])],
+    transferredCalibration: () => [
+      a.transferredCalibration({
+        signals: masses.map((m) => 3 - 0.2 * m),
+        referenceSignals: masses.map((m, i) => (2 - 0.13 * m) * (i % 2 ? 1.001 : 1)),
+        airMasses: masses,
+        referenceConstant: 2,
+        referenceStandardUncertainty: 0.01,
+      }),
+    ],
+    zenithStandardUncertainty: () => [
+      a.zenithStandardUncertainty({
+        ...{ latitudeDeg: 40, sunAzimuthDeg: 100, timeStandardUncertaintyS: 2 },
+        latitudeStandardUncertaintyDeg: 0.001,
+        longitudeStandardUncertaintyDeg: 0.001,
+      }),
+    ],
+  };
+}
+
+/** Propagation of uncertainty. */
+function uncertaintyGrid(a) {
+  const inputs = {
+    x: { value: 3, standardUncertainty: 0.1 },
+    y: { value: 4, standardUncertainty: 0.2, degreesOfFreedom: 9 },
+  };
+  const product = a.propagate(({ x, y }) => x * y, inputs);
+  const sum = a.propagate(({ x, y }) => x + y, inputs);
+  const random = a.seededRandom(7);
+  return {
+    coverageFactor: () => each([0.9, 0.99], [5, 16, 1000], a.coverageFactor),
+    monteCarlo: () => [a.monteCarlo(({ x, y }) => x * y, inputs, { random: a.seededRandom(3) })],
+    propagate: () => [product, sum],
+    propagatedCorrelation: () => [a.propagatedCorrelation(sum, product)],
+    seededRandom: () => Array.from({ length: 20 }, random),
   };
 }
 

