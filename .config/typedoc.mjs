@@ -19,7 +19,7 @@ const guides = [
 
 export default {
   name: "Airlight",
-  entryPoints: ["../src/units.ts", "../src/constants.ts", ...rooms],
+  entryPoints: ["../src/units.ts", "../src/constants.ts", "../src/budget.ts", ...rooms],
   projectDocuments: [
     ...guides,
     ...["quantities", "sources", "cautions"].map((name) => `../.cache/site/${name}.md`),

@@ -2,11 +2,10 @@
 import ts from "typescript";
 import { textOf, treeOf } from "../_source.js";
 
-/** Names of the modules that re-export: rooms of package.json, then what src/index.ts adds. */
+/** Paths of the modules src/index.ts gathers, without "./" and ".js": ground files and rooms' indexes. */
 function modules(): string[] {
-  const { exports } = JSON.parse(textOf("package.json"));
-  const rooms = Object.keys(exports).filter((path) => path !== "." && !path.endsWith(".json"));
-  return ["units", "constants", ...rooms.map((path) => path.slice(2))];
+  const gathered = textOf("src/index.ts").matchAll(/^export \* from "\.\/(.+)\.js";/gm);
+  return [...gathered].map((match) => match[1]!);
 }
 
 /** Declarations of a source file as a consumer's compiler sees them, comments removed. */
@@ -48,12 +47,13 @@ function reexports(room: string): [path: string, names: Set<string>][] {
 
 /** The whole report. */
 export function apiReport(): string {
-  const chapters = modules().map((name) => {
-    const whole = name === "units" || name === "constants";
-    const texts = whole
-      ? statementsOf(`src/${name}.ts`)
-      : reexports(name).flatMap(([path, names]) => statementsOf(path, names));
-    return `# ${name}\n\n${texts.sort().join("\n")}\n`;
+  const chapters = modules().map((path) => {
+    const room = path.replace(/\/index$/, "");
+    const texts =
+      room === path
+        ? statementsOf(`src/${path}.ts`)
+        : reexports(room).flatMap(([file, names]) => statementsOf(file, names));
+    return `# ${room}\n\n${texts.sort().join("\n")}\n`;
   });
   return `Public interface of airlight; npm run api writes it anew.\n\n${chapters.join("\n")}`;
 }
