@@ -35,7 +35,6 @@ function install(): void {
 function score(room: string): { noticed: number; all: number } {
   const config = {
     mutate: [`src/${room}/**/*.ts`, `!src/${room}/**/index.ts`],
-    plugins: [`${FOLDER}node_modules/@stryker-mutator/vitest-runner`],
     testRunner: "vitest",
     vitest: { configFile: ".config/vitest.mutation.config.ts" },
     // texts of messages are tested by a few words only
