@@ -22,6 +22,7 @@ export default {
   entryPoints: ["../src/units.ts", "../src/constants.ts", "../src/budget.ts", ...rooms],
   projectDocuments: [
     ...guides,
+    "../examples/paths/air-masses.md",
     ...["quantities", "sources", "cautions"].map((name) => `../.cache/site/${name}.md`),
   ],
   out: "../.docs",

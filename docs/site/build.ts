@@ -45,6 +45,8 @@ rmSync(SITE, { recursive: true, force: true });
 writePages();
 await writeRunScript();
 const app = await Application.bootstrapWithPlugins({ options: `${ROOT}.config/typedoc.mjs` });
+// without its options TypeDoc would write, and first empty, another folder
+if (app.logger.hasErrors() || `${app.options.getValue("out")}/` !== OUT) process.exit(1);
 attachSite(app);
 const project = await app.convert();
 if (project === undefined) process.exit(1);

@@ -1,7 +1,6 @@
 /** The way of sunlight through each constituent. */
-import { airMassKastenWater, airMassShell, airMassYoung, refractionSaemundsson } from "airlight";
-import type { Reading } from "./readReadings.js";
-import type { Station } from "./readStation.js";
+import { airMassOnTruePath, constituentMassOnTruePath, type PreparedPath } from "airlight";
+import type { Constituent } from "./stationPaths.js";
 
 /** Air mass of each constituent on one way to the sun. */
 export interface AirMasses {
@@ -13,13 +12,11 @@ export interface AirMasses {
   readonly aerosol: number;
 }
 
-/** Air masses at a true zenith angle; aerosol's goes with the apparent angle, refracted by the weather of the reading. */
-export function airMasses(trueZenithDeg: number, reading: Reading, station: Station): AirMasses {
-  const { ozoneHeightM, altitudeM } = station;
-  const apparentZenithDeg = trueZenithDeg - refractionSaemundsson(trueZenithDeg, reading);
+/** Air masses at a true zenith angle, on the ray refracted by the weather that the path was prepared for. */
+export function airMasses(trueZenithDeg: number, path: PreparedPath<Constituent>): AirMasses {
   return {
-    air: airMassYoung(trueZenithDeg),
-    ozone: airMassShell(trueZenithDeg, { shellHeightM: ozoneHeightM, altitudeM }),
-    aerosol: airMassKastenWater(apparentZenithDeg),
+    air: airMassOnTruePath(trueZenithDeg, path),
+    ozone: constituentMassOnTruePath(trueZenithDeg, path, "ozone"),
+    aerosol: constituentMassOnTruePath(trueZenithDeg, path, "aerosol"),
   };
 }

@@ -49,7 +49,7 @@ export function analyseStation(folder: string): StationResult {
   const aerosol = blaming(measured, () =>
     retrieveAerosol(calibrations, measuredDay, station.latitudeDeg),
   );
-  const air = typicalAir(aerosol, nearestTo500(calibrations));
+  const air = typicalAir(aerosol, nearestTo500(calibrations), station);
   if (air === undefined) {
     const what = "no reading is free of cloud with an aerosol depth above 0 in every channel";
     throw inputError(measured, what);

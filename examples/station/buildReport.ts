@@ -6,7 +6,14 @@ import type { Pictures } from "./drawPictures.js";
 import { evidenceTable } from "./evidence.js";
 import { nearestTo500 } from "./nearestTo500.js";
 import { plainColour } from "./plotting.js";
-import { aerosolTable, calibrationTable, clockOf, cloudTable, sunTable } from "./resultTables.js";
+import {
+  aerosolTable,
+  calibrationTable,
+  clockOf,
+  cloudTable,
+  pathTable,
+  sunTable,
+} from "./resultTables.js";
 import { escapeHtml, tableAsHtml } from "./table.js";
 import { CAUTIONS, LIMITS, methodWords } from "./words.js";
 
@@ -49,6 +56,7 @@ ${tableAsHtml(cloudTable(result))}
 ${tableAsHtml(budgetTable(result))}
 ${figure("budget", "What each line contributes to the standard uncertainty of that reading, and all of them together (the root of the sum of their squares).")}
 <h2>The sun from high to low</h2>
+${tableAsHtml(pathTable(result))}
 ${tableAsHtml(sunTable(result))}
 ${figure("sun-spectra", "Direct light on a plane facing the sun, for the median air of the day, at the true heights of the table.")}
 ${figure("sun-colours", "Computed colours, each as bright as a display can show it, against the sun's true height.")}

@@ -2,6 +2,7 @@
 import {
   airColumn,
   type Beam,
+  type BeamMasses,
   beamIrradiance,
   chromaticity,
   cie1931Observer,
@@ -10,7 +11,8 @@ import {
   correlatedColourTemperature,
   encodeSrgb,
   fitToDisplay,
-  refractionSaemundsson,
+  type PreparedPath,
+  refractionOnTruePath,
   type Spectrum,
   spectrumToXyz,
   srgbHex,
@@ -23,6 +25,7 @@ import { mean, median } from "./lines.js";
 import { precipitableWaterCm } from "./precipitableWaterCm.js";
 import type { Station } from "./readStation.js";
 import type { AerosolPoint } from "./retrieveAerosol.js";
+import { type Constituent, stationPath } from "./stationPaths.js";
 
 /** True heights of the sun's centre above the horizon, degrees. */
 export const SUN_HEIGHTS_DEG: readonly number[] = [60, 30, 15, 8, 4, 2];
@@ -40,12 +43,16 @@ export interface TypicalAir {
   /** Estimated from the weather at the ground. */
   readonly waterCm: number;
   readonly distanceAu: number;
+  /** The refracted ray through the mean weather of those readings. */
+  readonly path: PreparedPath<Constituent>;
 }
 
 /** Direct sunlight at one height of the sun. */
 export interface SunView {
   readonly trueHeightDeg: number;
   readonly apparentHeightDeg: number;
+  /** Air mass of each constituent. */
+  readonly masses: BeamMasses;
   /** On a plane facing the sun, W m⁻² nm⁻¹, 300 to 1100 nm. */
   readonly spectrum: Spectrum;
   /** On a plane facing the sun. */
@@ -58,19 +65,29 @@ export interface SunView {
 }
 
 /** The day as one state of the air, `k` the channel nearest 500 nm; undefined without a reading free of cloud that has a power law. */
-export function typicalAir(points: readonly AerosolPoint[], k: number): TypicalAir | undefined {
+export function typicalAir(
+  points: readonly AerosolPoint[],
+  k: number,
+  station: Station,
+): TypicalAir | undefined {
   const clear = points.filter(({ cloudy, powerLaw }) => !cloudy && powerLaw !== undefined);
   if (clear.length === 0) return undefined;
   const over = (pick: (point: AerosolPoint) => number): number[] => clear.map(pick);
-  return {
+  const weather = {
     pressurePa: mean(over(({ reading }) => reading.pressurePa)),
     temperatureK: mean(over(({ reading }) => reading.temperatureK)),
+    relativeHumidity: mean(over(({ reading }) => reading.relativeHumidity)),
+  };
+  return {
+    pressurePa: weather.pressurePa,
+    temperatureK: weather.temperatureK,
     turbidity: median(over(({ powerLaw }) => powerLaw!.turbidity)),
     exponent: median(over(({ powerLaw }) => powerLaw!.exponent)),
     depthUncertainty: median(over(({ budgets }) => budgets[k]!.standardUncertainty)),
     exponentUncertainty: median(over((point) => point.powerLawUncertainty!.exponent)),
     waterCm: median(over(({ reading }) => precipitableWaterCm(reading))),
     distanceAu: mean(over(({ reading }) => reading.distanceAu)),
+    path: stationPath(weather, station),
   };
 }
 
@@ -85,7 +102,8 @@ export function viewSun(trueHeightDeg: number, air: TypicalAir, station: Station
   const [x, y] = chromaticity(xyz);
   return {
     trueHeightDeg,
-    apparentHeightDeg: trueHeightDeg + refractionSaemundsson(trueZenithDeg, air),
+    apparentHeightDeg: trueHeightDeg + refractionOnTruePath(trueZenithDeg, air.path),
+    masses: beam.masses,
     spectrum,
     illuminanceLx: xyz[1],
     chromaticity: [x, y],
@@ -97,7 +115,7 @@ export function viewSun(trueHeightDeg: number, air: TypicalAir, station: Station
 function beamAt(trueZenithDeg: number, air: TypicalAir, station: Station): Beam {
   const { altitudeM, latitudeDeg, co2Ppm } = station;
   const { ozoneDu, ozoneTemperatureK, ozoneHeightM, nitrogenDioxideDu } = station;
-  const { pressurePa, waterCm, turbidity, exponent } = air;
+  const { pressurePa, waterCm, turbidity, exponent, path } = air;
   return clearBeam({
     column: airColumn({ pressurePa, altitudeM, latitudeDeg, co2Ppm }),
     trueZenithDeg,
@@ -107,6 +125,7 @@ function beamAt(trueZenithDeg: number, air: TypicalAir, station: Station): Beam 
     nitrogenDioxideDu,
     waterCm,
     aerosol: { opticalDepth: turbidity, referenceNm: 1000, exponent },
+    path,
   });
 }
 

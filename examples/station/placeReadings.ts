@@ -1,9 +1,10 @@
 /** Readings with the sun's place and the air masses that belong to them. */
-import { airColumn } from "airlight";
+import { airColumn, pathInWeather } from "airlight";
 import { type AirMasses, airMasses } from "./airMasses.js";
 import { blaming, inputError } from "./inputError.js";
 import type { Reading } from "./readReadings.js";
 import type { Station } from "./readStation.js";
+import { dayPaths } from "./stationPaths.js";
 import { sunAt } from "./sunAt.js";
 
 /** A reading and the way its light came. */
@@ -22,7 +23,7 @@ export function placeReadings(
   station: Station,
 ): PlacedReading[] {
   const { altitudeM, latitudeDeg, co2Ppm } = station;
-  return readings.map((reading) => {
+  const placed = readings.map((reading) => {
     const place = { file, row: reading.row };
     const { trueZenithDeg, distanceAu } = sunAt(reading.time, station);
     if (trueZenithDeg > 89.5) {
@@ -35,12 +36,11 @@ export function placeReadings(
       { ...place, column: "pressure_pa" },
       () => airColumn({ pressurePa, altitudeM, latitudeDeg, co2Ppm }).moleculesPerM2,
     );
-    return {
-      ...reading,
-      trueZenithDeg,
-      distanceAu,
-      masses: airMasses(trueZenithDeg, reading, station),
-      molecules,
-    };
+    return { ...reading, trueZenithDeg, distanceAu, molecules };
+  });
+  const paths = blaming({ file }, () => dayPaths(readings, station));
+  return placed.map((reading) => {
+    const path = pathInWeather(reading, paths);
+    return { ...reading, masses: airMasses(reading.trueZenithDeg, path) };
   });
 }

@@ -107,6 +107,29 @@ export function cloudTable({ aerosol, calibrations, station }: StationResult): T
   };
 }
 
+/** The way of the sun's light at several heights. */
+export function pathTable({ views }: StationResult): Table {
+  return {
+    title: "The sun's path through the air of the measured day",
+    columns: [
+      ["true height", "degrees"],
+      ["seen height", "degrees"],
+      ["refraction", "arcmin"],
+      ["air mass", "air"],
+      ["air mass", "ozone, NO2"],
+      ["air mass", "water, aerosol"],
+    ],
+    rows: views.map(({ trueHeightDeg, apparentHeightDeg, masses }) => [
+      trueHeightDeg.toFixed(0),
+      apparentHeightDeg.toFixed(3),
+      ((apparentHeightDeg - trueHeightDeg) * 60).toFixed(2),
+      masses.air.toFixed(3),
+      masses.ozone.toFixed(3),
+      masses.aerosol.toFixed(3),
+    ]),
+  };
+}
+
 /** The sun at several heights. */
 export function sunTable({ views, viewUncertainties }: StationResult): Table {
   return {

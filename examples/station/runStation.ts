@@ -7,7 +7,7 @@ import { buildReport, summaryWords } from "./buildReport.js";
 import { drawPictures } from "./drawPictures.js";
 import { evidenceTable } from "./evidence.js";
 import { standalone } from "./plotting.js";
-import { aerosolTable, calibrationTable, cloudTable, sunTable } from "./resultTables.js";
+import { aerosolTable, calibrationTable, cloudTable, pathTable, sunTable } from "./resultTables.js";
 import { tableAsText } from "./table.js";
 import { CAUTIONS } from "./words.js";
 import { writeOutput } from "./writeOutput.js";
@@ -28,7 +28,15 @@ export function runStation(
   print(result.station.station);
   if (result.station.about !== "") print(result.station.about);
   print(`\n${summaryWords(result)}\n`);
-  const tables = [calibrationTable, aerosolTable, cloudTable, budgetTable, sunTable, evidenceTable];
+  const tables = [
+    calibrationTable,
+    aerosolTable,
+    cloudTable,
+    budgetTable,
+    pathTable,
+    sunTable,
+    evidenceTable,
+  ];
   for (const table of tables) print(`${tableAsText(table(result))}\n`);
   print(`${ASSUMED_WORDS}\n`);
   print("Cautions");

@@ -23,7 +23,7 @@ export function methodWords({
     ],
     [
       "Air masses",
-      "Each constituent has its own: molecular scattering that of air (Young 1994, true angle), ozone and nitrogen dioxide that of a thin shell at the height of the ozone layer, aerosol that of something near the ground (Kasten 1965, apparent angle, refracted with the weather of the reading).",
+      "Each constituent has its own, on the ray refracted by the weather of the reading: air in hydrostatic balance over the standard atmosphere's shape, ozone and nitrogen dioxide in a layer 5 km wide (standard deviation) at the height of the ozone layer, aerosol and water thinning out with 2 km. The Earth is the sphere that fits it here eastwards.",
     ],
     [
       "Known gases",

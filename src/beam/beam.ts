@@ -1,6 +1,7 @@
 /** What a beam is made of: the air above the site and the air mass of each constituent. */
 import type { AirColumn } from "../column/airColumn.js";
 import type { AngstromAerosol } from "../column/angstromOpticalDepth.js";
+import type { PreparedPath } from "../path/preparedPath.js";
 import type {
   Centimetres,
   Degrees,
@@ -40,6 +41,11 @@ export interface BeamState {
   readonly waterCm: Centimetres;
   /** Aerosol by Ångström's law. */
   readonly aerosol: AngstromAerosol;
+  /**
+   * Prepared path with constituents `ozone`, `water`, `aerosol` and, if it differs from ozone, `nitrogenDioxide`: the air
+   * masses come from it instead of the closed formulas, and the ozone's height from its layer.
+   */
+  readonly path?: PreparedPath<string>;
 }
 
 /** Prepared beam; make it with `clearBeam` or `beamAt`. */

@@ -5,6 +5,7 @@ import type { Degrees } from "../units.js";
 import { massesAt } from "./_beamMasses.js";
 import { beamOf } from "./_beamOf.js";
 import { checkMasses } from "./_checkBeam.js";
+import { checkBeamPath, checkBeamZenith } from "./_massesOnPath.js";
 import type { Beam, BeamMasses, BeamState } from "./beam.js";
 
 /** What `clearBeam` takes. */
@@ -21,13 +22,16 @@ export interface ClearBeamInput extends BeamState {
  * Model: each constituent on its own air mass. Air: `airMassYoung` at the true zenith angle. Ozone and nitrogen dioxide: thin shell,
  * `airMassShell`. Water and aerosol: `airMassKastenWater` at the apparent zenith angle, which is the true one less
  * `refractionSaemundsson` at the column's pressure and the standard atmosphere's temperature at its altitude. Mixed gases: air's mass.
+ * With a prepared `path` every mass is the refracted ray's, and the angle may go down to the path's horizon.
  * Validity: true zenith angle 0 to 90°; ozone 0 to 1000 DU at 200 to 298 K, layer 1 to 100 km high and above the site; nitrogen
  * dioxide 0 to 50 DU; water 0 to 20 cm; aerosol as `angstromOpticalDepth`; own masses 0 to 1000; enforced. No cloud.
- * Accuracy: that of the air mass formulas, see each; air's mass for ozone would be wrong by 21 % at 85°.
+ * Accuracy: that of the air mass formulas, see each; air's mass for ozone would be wrong by 21 % at 85°. With a path, 1e-9
+ * relative in every mass.
  * Source: composition; the formulas name theirs.
  *
  * @param input - `column` from `airColumn`; `trueZenithDeg` 0 to 90°; `ozoneDu`, `ozoneTemperatureK`, `ozoneHeightM`;
- *   `nitrogenDioxideDu`; `waterCm`; `aerosol: { opticalDepth, referenceNm, exponent }`; `masses` to override all air masses
+ *   `nitrogenDioxideDu`; `waterCm`; `aerosol: { opticalDepth, referenceNm, exponent }`; `masses` to override all air
+ *   masses; `path` prepared at the column's altitude with constituents `ozone`, `water`, `aerosol` (and `nitrogenDioxide`)
  * @returns the prepared beam
  * @throws TypeError if a value is of the wrong kind; RangeError if it is out of range
  * @example
@@ -42,9 +46,10 @@ export interface ClearBeamInput extends BeamState {
 export function clearBeam(input: ClearBeamInput): Beam {
   checkRecord(input, "input", "clearBeam");
   const { column, trueZenithDeg, ozoneDu, ozoneTemperatureK, ozoneHeightM } = input;
-  const { nitrogenDioxideDu, waterCm, aerosol, masses } = input;
+  const { nitrogenDioxideDu, waterCm, aerosol, masses, path } = input;
   checkPrepared(column?.moleculesPerM2, "airColumn", "column", "clearBeam");
-  checkNumber(trueZenithDeg, 0, 90, "degrees", "trueZenithDeg", "clearBeam");
+  if (path !== undefined) checkBeamPath(path, column, "clearBeam");
+  checkBeamZenith(trueZenithDeg, path, "clearBeam");
   checkNumber(ozoneDu, 0, 1000, "DU", "ozoneDu", "clearBeam");
   checkNumber(ozoneTemperatureK, 200, 298, "K", "ozoneTemperatureK", "clearBeam");
   const lowest = Math.max(1000, column.altitudeM + 1);
@@ -56,6 +61,7 @@ export function clearBeam(input: ClearBeamInput): Beam {
   const state = {
     ...{ column, ozoneDu, ozoneTemperatureK, ozoneHeightM, nitrogenDioxideDu, waterCm },
     aerosol: { ...aerosol },
+    ...(path && { path }),
   };
   return beamOf(state, trueZenithDeg, masses ?? massesAt(state, trueZenithDeg));
 }

@@ -17,8 +17,9 @@ export interface Shell {
  *
  * Model: 1 / cos of the angle at which a straight ray crosses the layer.
  * Validity: true zenith angle 0 to 90°; layer 1 to 100 km high and above the observer; observer -500 to 20 000 m; enforced.
- * Accuracy: 1e-12 against plane trigonometry by the sine rule.
- * A real ozone layer is thick and the ray bends: see the documentation of the ray for what that costs.
+ * Accuracy: 1e-12 against plane trigonometry by the sine rule. A real ozone layer is thick and the ray bends: against
+ * `refractedPath` through a Gaussian layer at 22 km of 5 km standard deviation, seen from sea level, within 0.01 % to 75°,
+ * -0.04 % at 80°, -0.5 % at 85°, -2.4 % at 88°, -5.6 % at 90°.
  * Source: geometry; its use for ozone Komhyr 1980 (from memory). Earth radius 6371.0088 km (IUGG mean).
  *
  * @param trueZenithDeg - true (geometric) zenith angle, 0 to 90°

@@ -15,8 +15,9 @@ const TEMPERATURE_K = 283;
  *
  * Model: cotangent of a shifted elevation, in proportion to pressure over temperature.
  * Validity: apparent zenith angle 0 to 90°, enforced; yellow light, weather near standard.
- * Accuracy: 0.07′ over the whole range as its author states; -0.08″ at the zenith, where 0 is right; 34.5′ at the horizon, where the weather near the ground moves
- * the truth by several arcminutes.
+ * Accuracy: within 6.1″ (0.10′) to 87° against `refractedPath` in its own weather (101 kPa, 283 K, humidity 0.5, 575 nm), +20″ at
+ * 89°, +44″ at the horizon. Its author states 0.07′ over the whole range. -0.08″ at the zenith, where 0 is
+ * right; 34.5′ at the horizon, where the weather near the ground moves the truth by several arcminutes.
  * Source: Bennett 1982, J. Navigation 35, 255, formula G; printed in Meeus, Astronomical Algorithms, chapter 16 (from memory).
  *
  * @param apparentZenithDeg - apparent (refracted) zenith angle, 0 to 90°

@@ -16,8 +16,10 @@ const TEMPERATURE_K = 283;
  *
  * Model: cotangent of a shifted elevation, in proportion to pressure over temperature.
  * Validity: true zenith angle 0 to 90.6° (the apparent horizon), enforced; yellow light, weather near standard.
- * Accuracy: 0.07′ against `refractionBennett` at the refracted angle (its author states 0.1′); -0.1″ at the zenith, where 0 is right; refraction at the horizon varies by several
- * arcminutes with the weather near the ground, which no such formula knows.
+ * Accuracy: within 9.7″ (0.16′) to 88° against `refractedPath` in its own weather (101 kPa, 283 K, humidity 0.5, 575 nm), +11″ at
+ * 89°, +31″ at 90°. 0.07′ against `refractionBennett` at the refracted angle (its author states
+ * 0.1′); -0.1″ at the zenith, where 0 is right; refraction at the horizon varies by several arcminutes with the weather near
+ * the ground, which no such formula knows.
  * Source: Sæmundsson 1986, Sky & Telescope 72, 70; printed in Meeus, Astronomical Algorithms, chapter 16 (from memory).
  *
  * @param trueZenithDeg - true (geometric) zenith angle, 0 to 90.6°

@@ -1,5 +1,5 @@
 /** Least squares for data whose errors are correlated. */
-import { sqrt } from "../_numeric.js";
+import { choleskyRoot } from "../_choleskyRoot.js";
 import { type LinearFit, leastSquares } from "./_leastSquares.js";
 
 /**
@@ -12,23 +12,10 @@ export function correlatedLeastSquares(
   covariance: Float64Array,
 ): LinearFit | undefined {
   const root = choleskyRoot(covariance, data.length);
-  if (root === undefined) return undefined;
+  // a zero on the diagonal: some of the data follow wholly from the others
+  if (root === undefined || data.some((_, i) => root[i * data.length + i] === 0)) return undefined;
   const divided = columns.map((column) => forward(root, column));
   return leastSquares(divided, forward(root, data), new Float64Array(data.length).fill(1));
-}
-
-/** Lower triangular root of a symmetric matrix, undefined where it is not positive definite. */
-function choleskyRoot(matrix: Float64Array, n: number): Float64Array | undefined {
-  const root = new Float64Array(n * n);
-  for (let i = 0; i < n; i++) {
-    for (let j = 0; j <= i; j++) {
-      let sum = matrix[i * n + j]!;
-      for (let k = 0; k < j; k++) sum -= root[i * n + k]! * root[j * n + k]!;
-      if (i === j && !(sum > 1e-14 * matrix[i * n + i]!)) return undefined;
-      root[i * n + j] = i === j ? sqrt(sum) : sum / root[j * n + j]!;
-    }
-  }
-  return root;
 }
 
 /** Solves root × result = vector. */

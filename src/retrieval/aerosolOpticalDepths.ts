@@ -19,8 +19,9 @@ import { screenDays } from "./_screenDays.js";
  * atmosphere's; it is used for the uncertainty alone.
  * Validity: as `aerosolOpticalDepth`. A NaN or a signal that is not above 0 gives NaN at that place, and code 1 of the
  * screening if it is in the screened channel.
- * Accuracy: depths 1e-12 against `aerosolOpticalDepth` reading by reading, uncertainties 1 % to air mass 6. A year of
- * one-minute readings in six channels takes well under a second.
+ * Accuracy: depths 1e-12 against `aerosolOpticalDepth` reading by reading, uncertainties 1e-10 with the same slopes. To air
+ * mass 6 the flat slope is within 6 % of a spherical one's, 12 % for ozone's shell at 22 km, which a zenith angle known to 0.02° hardly
+ * shows. Some 0.1 µs a value (measured on Node 20).
  * Source: as `aerosolOpticalDepth` and `cloudScreening`.
  *
  * @param readings - typed arrays, one value per reading; `signals` reading by reading, channels innermost

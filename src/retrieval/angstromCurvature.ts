@@ -35,7 +35,7 @@ export interface AngstromCurvature {
  * power law (`angstromFit`) does not.
  * Validity: three or more different wavelengths; every depth at least four times its standard uncertainty, enforced: below,
  * the logarithm is neither unbiased nor normal, and an exponent would be a guess.
- * Accuracy: recovers an exact curve to 1e-10; with depths of 5 % uncertainty, partly shared between channels, the stated
+ * Accuracy: recovers an exact curve to 1e-9; with depths of 5 % uncertainty, partly shared between channels, the stated
  * uncertainties match the spread of 4000 simulated fits within 5 %.
  * Source: Eck et al. 1999, J. Geophys. Res. 104, 31333 (second order in ln wavelength, from memory); generalised least squares.
  *

@@ -50,7 +50,7 @@ export interface CombinedCalibration {
  * Validity: at least 3 mornings; constants that did not drift between them (`calibrationDrift` if they did). A drift of the
  * haze with air mass common to all mornings of a site cannot be seen by any scatter.
  * Accuracy: over 300 simulated sets of 6 mornings whose haze drifts as a parabola, fit errors alone cover the truth in under
- * half of the sets at 95 %, this interval in 92 to 98 %.
+ * half of the sets at 95 %, this interval in 92 to 98.5 %.
  * Source: Paule & Mandel 1982, J. Res. Natl. Bur. Stand. 87, 377; Iglewicz & Hoaglin 1993, How to Detect and Handle
  * Outliers (modified z-score); both from memory.
  *

@@ -10,7 +10,7 @@ const NAME = "opticalDepthCovariance";
  * Model: lines of the budgets that share one cause (`sharedInputs`: the zenith angle, the pressure behind "Rayleigh", the
  * ozone column) are wholly correlated between channels, with their signs; all other lines are independent.
  * Validity: first order, as the budgets themselves.
- * Accuracy: 1e-15 against sums written out.
+ * Accuracy: 1e-14 relative against sums written out.
  * Source: GUM 2008, F.1.2.3.
  *
  * @param depths - results of `aerosolOpticalDepth`, one per channel

@@ -69,7 +69,7 @@ export interface OzoneColumn extends Budget {
  * is near 610 nm, and 35 to 110 DU if none lies between 500 and 675 nm. Cross-sections at the centre of the band instead of
  * means over it bias an ultraviolet pair of 2 nm width by some 5 to 12 DU. Ultraviolet light harms eyes and skin: mind the
  * usual cautions.
- * Accuracy: exact to 1e-9 DU on noise-free readings of the same model; 1 DU on a simulated ultraviolet pair of 2 nm width with
+ * Accuracy: exact to 1e-8 DU on noise-free readings of the same model; 1 DU on a simulated ultraviolet pair of 2 nm width with
  * averaged cross-sections; the stated uncertainty matches the spread of 400 simulated pairs and fits within 10 %.
  * Source: Dobson's differential method (1931, from memory); Chappuis-band fits as King & Byrne 1976, J. Atmos. Sci. 33, 2242 (from memory).
  *

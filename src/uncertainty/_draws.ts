@@ -1,9 +1,9 @@
 /** Draws of the inputs for Monte Carlo. */
 import { refuse } from "../_check.js";
+import { choleskyRoot } from "../_choleskyRoot.js";
 import { normalQuantile } from "../_normalQuantile.js";
 import { cos, sqrt } from "../_numeric.js";
 import { correlationMatrix, type Correlation, type UncertainInput } from "./_inputs.js";
-import { choleskyRoot } from "./_choleskyRoot.js";
 import type { RandomSource } from "./seededRandom.js";
 
 /** From a uniform number to a deviate of mean 0 and standard deviation 1, by the inverse of each distribution function. */
@@ -31,6 +31,9 @@ export function prepareDraws<Name extends string>(
   const deviates = names.map((name) => deviateOf(name, inputs, correlations));
   const count = names.length;
   const root = choleskyRoot(correlationMatrix(names, correlations, "monteCarlo"), count);
+  if (root === undefined) {
+    throw new RangeError("monteCarlo: correlations must be coefficients that can hold together");
+  }
   const standard = new Float64Array(count);
   const place = (i: number, deviate: number): number =>
     inputs[names[i]!].value + inputs[names[i]!].standardUncertainty * deviate;

@@ -47,7 +47,7 @@ export interface MonteCarloResult extends Budget {
  * together or are correlated.
  * Validity: any finite model. Correlated inputs must be normal, enforced.
  * Accuracy: within the stated digits; Supplement 1's examples 9.2.2 to 9.2.4, 9.3 and 9.4 to their printed digits. Where the
- * model is nearly straight it agrees with `propagate` within 1 %.
+ * model is nearly straight it agrees with `propagate` within 2 %.
  * Source: JCGM 101:2008 (GUM Supplement 1), clause 7 (7.9 for the number of trials), annex B for the budget.
  *
  * @param model - pure function of a record of named numbers; it must not keep or change the record

@@ -8,6 +8,7 @@ import { Bench } from "tinybench";
 import { air } from "./air.mjs";
 import { beam } from "./beam.mjs";
 import { colour } from "./colour.mjs";
+import { path } from "./path.mjs";
 import { scattering } from "./scattering.mjs";
 
 const ROUNDS = 7;
@@ -27,7 +28,7 @@ async function timesOf(functions, milliseconds) {
 const median = (values) => [...values].sort((a, b) => a - b)[values.length >> 1];
 
 const wanted = process.argv.slice(2);
-const groups = { scattering, air, beam, colour };
+const groups = { scattering, air, path, beam, colour };
 for (const [name, cases] of Object.entries(groups)) {
   if (wanted.length > 0 && !wanted.some((word) => name.includes(word))) continue;
   console.log(name);

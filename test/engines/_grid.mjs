@@ -38,6 +38,7 @@ export function gridOf(a) {
   const wiggle = (i) => 1 + (((i * 7) % 11) - 5) * 1e-4;
   const surface = { pressurePa: 95000, temperatureK: 280 };
   return {
+    ...pathGrid(a, zenith),
     ...readingGrid(a, beam),
     ...uncertaintyGrid(a),
     airColumn: () => sites.map(a.airColumn),
@@ -118,6 +119,68 @@ export function gridOf(a) {
     waterVapourTransmittance: () => each(nm, [0.1, 1, 8], a.waterVapourTransmittance),
     wavelengthGrid: () => [grid],
     xyzToLinearSrgb: () => xyzs.map(a.xyzToLinearSrgb),
+  };
+}
+
+/** Profiles, rays and prepared paths. */
+function pathGrid(a, zenith) {
+  const station = { pressurePa: 95000, temperatureK: 283.15, relativeHumidity: 0.6 };
+  const profile = a.standardProfile({ ...station, altitudeM: 540, co2Ppm: 425 });
+  const rows = [113, 480, 1520, 3010].map((heightM, i) => ({
+    heightM,
+    temperatureK: [279.2, 283.4, 276.9, 268.1][i],
+    pressurePa: [100400, 95990, 84600, 70200][i],
+    relativeHumidity: 0.5,
+  }));
+  const smoke = [15000, 18000, 21000].map((heightM, i) => ({ heightM, density: i % 2 }));
+  const site = { profile, altitudeM: 540, earthRadiusM: 6371000 };
+  const constituents = { ozone: a.gaussianLayer({ heightM: 22000, standardDeviationM: 5000 }) };
+  const input = { ...site, wavelengthNm: 550, constituents };
+  const path = a.preparePath(input);
+  const weather = a.prepareWeatherPaths({
+    ...input,
+    pressureRangePa: [94000, 96000],
+    temperatureRangeK: [275, 290],
+  });
+  const noon = a.pathInWeather({ pressurePa: 95300, temperatureK: 281 }, weather);
+  const star = { ...site, guideWavelengthNm: 500 };
+  const high = spread(0, 80, 9);
+  return {
+    airAtHeight: () => spread(600, 80000, 15).map((h) => a.airAtHeight(h, profile)),
+    airMassHardie: () => high.map(a.airMassHardie),
+    airMassKasten: () => zenith.map(a.airMassKasten),
+    airMassOnPath: () => zenith.map((z) => a.airMassOnPath(z, path)),
+    airMassOnTruePath: () => zenith.map((z) => a.airMassOnTruePath(z, path)),
+    airMassPickering: () => zenith.map(a.airMassPickering),
+    airMassRozenberg: () => zenith.map(a.airMassRozenberg),
+    airMassYoungIrvine: () => high.map(a.airMassYoungIrvine),
+    airMassesOnPath: () => [a.airMassesOnPath(zenith, path)],
+    airMassesOnTruePath: () => [a.airMassesOnTruePath(zenith, path)],
+    apparentZenith: () => [10, 60, 90].map((z) => a.apparentZenith(z, input)),
+    constituentMassOnPath: () => zenith.map((z) => a.constituentMassOnPath(z, path, "ozone")),
+    constituentMassOnTruePath: () =>
+      zenith.map((z) => a.constituentMassOnTruePath(z, path, "ozone")),
+    constituentMassesOnPath: () => [a.constituentMassesOnPath(zenith, path, "ozone")],
+    constituentMassesOnTruePath: () => [a.constituentMassesOnTruePath(zenith, path, "ozone")],
+    differentialRefraction: () =>
+      each([400, 700], [30, 75], (nm, z) =>
+        a.differentialRefraction(nm, { ...star, trueZenithDeg: z }),
+      ),
+    dispersionOffset: () => [a.dispersionOffset(400, { ...star, trueZenithDeg: 60 }, 30)],
+    earthCurvatureRadius: () => each([0, 45, 80], [0, 90, 200], a.earthCurvatureRadius),
+    exponentialLayer: () => [a.exponentialLayer({ scaleHeightM: 2000 })],
+    gaussianLayer: () => [constituents.ozone],
+    pathInWeather: () => zenith.map((z) => a.airMassOnPath(z, noon)),
+    preparePath: () => [path.horizonApparentZenithDeg, path.horizonTrueZenithDeg],
+    prepareWeatherPaths: () => weather.paths.map((one) => one.horizonTrueZenithDeg),
+    refractedPath: () => [0, 45, 85, 89.9].map((z) => a.refractedPath(z, input)),
+    refractionOnPath: () => zenith.slice(1).map((z) => a.refractionOnPath(z, path)),
+    refractionOnTruePath: () => zenith.slice(1).map((z) => a.refractionOnTruePath(z, path)),
+    refractionsOnPath: () => [a.refractionsOnPath(zenith.slice(1), path)],
+    refractionsOnTruePath: () => [a.refractionsOnTruePath(zenith.slice(1), path)],
+    standardProfile: () => [profile],
+    tabulatedLayer: () => [a.tabulatedLayer(smoke)],
+    tabulatedProfile: () => [a.tabulatedProfile(rows)],
   };
 }
 

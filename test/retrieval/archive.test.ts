@@ -5,6 +5,10 @@ import {
   type ArchiveReadings,
   aerosolOpticalDepth,
   aerosolOpticalDepths,
+  airMassKastenWater,
+  airMassKastenYoung,
+  airMassPerDegree,
+  airMassShell,
   cloudScreening,
 } from "../../src/index.js";
 import { between } from "../_generators.js";
@@ -160,6 +164,17 @@ describe("independent fixtures", () => {
       const codes = cloudScreening(timesMinutes.subarray(from, to), depths, 9);
       expect(result.screening.slice(from, to)).toEqual(codes);
     }
+  });
+});
+
+describe("the slope of a flat atmosphere", () => {
+  const flat = (m: number): number => (m * Math.sqrt(m * m - 1) * Math.PI) / 180;
+  it.each([30, 60, 75, 80.4])("is near a spherical one's at %d°", (zenith) => {
+    for (const airMass of [airMassKastenYoung, airMassKastenWater]) {
+      expectRelative(flat(airMass(zenith)), airMassPerDegree(airMass, zenith), 0.06); // as the comment says
+    }
+    const shell = (z: number): number => airMassShell(z, { shellHeightM: 22_000, altitudeM: 0 });
+    expectRelative(flat(shell(zenith)), airMassPerDegree(shell, zenith), 0.12);
   });
 });
 

@@ -119,6 +119,41 @@ describe("independent fixtures", () => {
     }
   });
 
+  it("follows a drifting instrument through three campaigns of simulated mornings", () => {
+    const perDay = -4e-5;
+    const campaigns = [
+      [20, 7.4],
+      [160, 5.9],
+      [300, 7.1],
+    ].map(([dayOfYear, fromHour]) => {
+      const fits = Array.from({ length: 5 }, (_, k) => {
+        const date = dayOfYear! + k;
+        const truth = {
+          ...drifting(date * 7, 0.001),
+          dayOfYear: date,
+          fromHour: fromHour!,
+          toHour: 11,
+        };
+        const day = stationDay({ ...truth, drift: Math.expm1(perDay * date) });
+        return morningFit(day, 0, 500, SUMMIT, morning);
+      });
+      const { constant, standardUncertainty } = combinedCalibration(fits);
+      return { timeDays: dayOfYear! + 2, constant, standardUncertainty };
+    });
+    const drift = calibrationDrift(campaigns);
+    expectAbsolute(drift.relativeDriftPerDay, perDay, 3 * Math.sqrt(drift.covariance[1][1]));
+    expectRelative(drift.relativeDriftPerDay, perDay, 0.3);
+    for (const timeDays of [30, 200, 365]) {
+      const { constant, expandedUncertainty } = calibrationAt(timeDays, drift);
+      expectAbsolute(
+        constant,
+        green[0].constant * Math.exp(perDay * timeDays),
+        expandedUncertainty,
+      );
+      expectRelative(constant, green[0].constant * Math.exp(perDay * timeDays), 0.0025);
+    }
+  });
+
   it("finds the drift by the normal equations, at both ends and between", () => {
     const dates = [3, 40, 200];
     const constants = [2, 1.97, 1.96];
