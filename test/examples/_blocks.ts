@@ -60,9 +60,12 @@ export function markdownBlocks(path: string, text: string): Block[] {
   );
 }
 
-/** The Markdown pages: those at the top and those of the documentation. */
+/** The Markdown pages: those at the top, of the documentation and of the examples. */
 export function pagePaths(): string[] {
-  return [...filesUnder("", ".md", false), ...filesUnder("docs", ".md")];
+  return [
+    ...filesUnder("", ".md", false),
+    ...["docs", "examples"].flatMap((folder) => filesUnder(folder, ".md")),
+  ];
 }
 
 /** Every block of the project. */
