@@ -5,7 +5,7 @@ export default defineConfig({
   root: new URL("..", import.meta.url).pathname,
   test: {
     include: ["test/**/*.test.ts"],
-    exclude: ["test/package/**", "test/examples/**"],
+    exclude: ["package", "examples", "site", "notebooks", "elsewhere"].map((one) => `test/${one}/**`),
     setupFiles: ["test/_seed.ts"],
     environment: "node",
     testTimeout: 60_000,

@@ -4,7 +4,7 @@ import { defineConfig } from "vitest/config";
 export default defineConfig({
   root: new URL("..", import.meta.url).pathname,
   test: {
-    include: ["test/package/**/*.test.ts", "test/examples/**/*.test.ts"],
+    include: ["test/package/**/*.test.ts", "test/examples/**/*.test.ts", "test/elsewhere/**/*.test.ts"],
     globalSetup: ["test/package/_consumer.ts"],
     environment: "node",
     testTimeout: 180_000,

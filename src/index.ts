@@ -9,6 +9,7 @@ export * from "./absorption/index.js";
 export * from "./column/index.js";
 export * from "./path/index.js";
 export * from "./beam/index.js";
+export * from "./sky/index.js";
 export * from "./colour/index.js";
 export * from "./retrieval/index.js";
 export * from "./uncertainty/index.js";

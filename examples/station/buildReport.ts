@@ -2,6 +2,7 @@
 import type { StationResult } from "./analyseStation.js";
 import { ASSUMED_WORDS } from "./assumed.js";
 import { budgetTable } from "./budgetedReading.js";
+import { skyTable } from "./clearSky.js";
 import type { Pictures } from "./drawPictures.js";
 import { evidenceTable } from "./evidence.js";
 import { nearestTo500 } from "./nearestTo500.js";
@@ -60,6 +61,9 @@ ${tableAsHtml(pathTable(result))}
 ${tableAsHtml(sunTable(result))}
 ${figure("sun-spectra", "Direct light on a plane facing the sun, for the median air of the day, at the true heights of the table.")}
 ${figure("sun-colours", "Computed colours, each as bright as a display can show it, against the sun's true height.")}
+<h2>The sky without haze</h2>
+${tableAsHtml(skyTable(result))}
+${figure("sky-spectra", "Light on level ground with the sun 30° high, in the day's air without haze: all orders of scattering, ground albedo 0.15.")}
 <h2>Evidence</h2>
 ${tableAsHtml(evidenceTable(result))}
 <p>A bend in the residuals would show a wrong air mass or a sky that changed. A wrong constant would put a channel off the power law most at low air mass; a wrong gas would put it off by the same depth at every air mass.</p>

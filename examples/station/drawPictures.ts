@@ -4,6 +4,8 @@ import { drawAerosolDepth, drawExponent } from "./drawAerosol.js";
 import { budgetedReading } from "./budgetedReading.js";
 import { drawBudget } from "./drawBudget.js";
 import { drawCalibrationLines, drawCalibrationResiduals } from "./drawCalibration.js";
+import { clearSkies } from "./clearSky.js";
+import { drawSky } from "./drawSky.js";
 import { drawColourStrip, drawSpectra } from "./drawSun.js";
 import type { PictureWidth } from "./plotting.js";
 import { signalUnit } from "./resultTables.js";
@@ -17,7 +19,8 @@ export type Pictures = Readonly<
     | "aerosol-exponent"
     | "budget"
     | "sun-spectra"
-    | "sun-colours",
+    | "sun-colours"
+    | "sky-spectra",
     string
   >
 >;
@@ -33,5 +36,6 @@ export function drawPictures(result: StationResult, width: PictureWidth): Pictur
     budget: drawBudget(budgetedReading(result), width),
     "sun-spectra": drawSpectra(views, air.distanceAu, width),
     "sun-colours": drawColourStrip(strip, views, width),
+    "sky-spectra": drawSky(clearSkies(result)[1]!, width),
   };
 }

@@ -4,6 +4,7 @@ import { analyseStation } from "./analyseStation.js";
 import { ASSUMED_WORDS } from "./assumed.js";
 import { budgetTable } from "./budgetedReading.js";
 import { buildReport, summaryWords } from "./buildReport.js";
+import { skyTable } from "./clearSky.js";
 import { drawPictures } from "./drawPictures.js";
 import { evidenceTable } from "./evidence.js";
 import { standalone } from "./plotting.js";
@@ -35,6 +36,7 @@ export function runStation(
     budgetTable,
     pathTable,
     sunTable,
+    skyTable,
     evidenceTable,
   ];
   for (const table of tables) print(`${tableAsText(table(result))}\n`);

@@ -10,6 +10,7 @@ import { beam } from "./beam.mjs";
 import { colour } from "./colour.mjs";
 import { path } from "./path.mjs";
 import { scattering } from "./scattering.mjs";
+import { skyCases } from "./sky.mjs";
 
 const ROUNDS = 7;
 const MILLISECONDS = 120;
@@ -28,7 +29,7 @@ async function timesOf(functions, milliseconds) {
 const median = (values) => [...values].sort((a, b) => a - b)[values.length >> 1];
 
 const wanted = process.argv.slice(2);
-const groups = { scattering, air, path, beam, colour };
+const groups = { scattering, air, path, beam, sky: skyCases, colour };
 for (const [name, cases] of Object.entries(groups)) {
   if (wanted.length > 0 && !wanted.some((word) => name.includes(word))) continue;
   console.log(name);

@@ -11,18 +11,23 @@ export interface Block {
   /** Name for a file made of it. */
   readonly id: string;
   readonly code: string;
+  /** Whether it is TypeScript to the letter; JavaScript leaves types open. */
+  readonly strict: boolean;
 }
 
 /** What running a block found. */
 export interface BlockResult {
   readonly checked: number;
   readonly errors: string[];
+  /** Markup of the picture the block put into the element "#picture"; empty if none. */
+  readonly picture: string;
 }
 
-const block = (path: string, line: number, code: string): Block => ({
+const block = (path: string, line: number, code: string, strict = true): Block => ({
   where: `${path}:${line}`,
   id: `${path}-${line}`.replace(/[^\w-]/g, "_"),
   code: code.trimEnd(),
+  strict,
 });
 
 /** The @example blocks of the comments of a source file. */
@@ -46,15 +51,27 @@ export function commentBlocks(path: string, text: string): Block[] {
 export function markdownBlocks(path: string, text: string): Block[] {
   const fence = /^(`{3,})(ts|typescript|js|javascript)\b.*\n([\s\S]*?)^\1[ \t]*$/gm;
   return [...text.matchAll(fence)].map((match) =>
-    block(path, text.slice(0, match.index).split("\n").length, match[3]!),
+    block(
+      path,
+      text.slice(0, match.index).split("\n").length,
+      match[3]!,
+      match[2]!.startsWith("t"),
+    ),
   );
+}
+
+/** The Markdown pages: those at the top, of the documentation and of the examples. */
+export function pagePaths(): string[] {
+  return [
+    ...filesUnder("", ".md", false),
+    ...["docs", "examples"].flatMap((folder) => filesUnder(folder, ".md")),
+  ];
 }
 
 /** Every block of the project. */
 export function allBlocks(): Block[] {
   const sources = filesUnder("src", ".ts").flatMap((path) => commentBlocks(path, textOf(path)));
-  const pages = filesUnder("", ".md", false).flatMap((path) => markdownBlocks(path, textOf(path)));
-  return [...sources, ...pages];
+  return [...sources, ...pagePaths().flatMap((path) => markdownBlocks(path, textOf(path)))];
 }
 
 /** What is wrong with the imports of a block: it must import from the package, and name other packages in a comment "// npm install x". */

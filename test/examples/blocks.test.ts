@@ -1,44 +1,35 @@
-import { execFileSync } from "node:child_process";
+import { writeFileSync } from "node:fs";
 import ts from "typescript";
 import { describe, expect, it } from "vitest";
 import { ROOT } from "../_source.js";
 import {
   allBlocks,
   type Block,
-  type BlockResult,
   commentBlocks,
   executable,
   importFaults,
   markdownBlocks,
   plainImports,
-  resultsOf,
-  writeBlocks,
 } from "./_blocks.js";
+import { runBlocks } from "./_results.js";
 
 const FOLDER = `${ROOT}.cache/examples/`;
 
-/** Runs the blocks in one process against dist; what each found wrong. */
-function runBlocks(blocks: readonly Block[]): Record<string, BlockResult> {
-  writeBlocks(FOLDER, blocks);
-  const output = execFileSync(process.execPath, [`${FOLDER}_runBlocks.mjs`], { encoding: "utf8" });
-  return resultsOf(output);
-}
-
 /** Errors of the compiler, by file. */
-function typeErrors(blocks: readonly Block[]): Map<string, string[]> {
-  const program = ts.createProgram(
-    blocks.map((block) => `${FOLDER}${block.id}.ts`),
-    {
-      target: ts.ScriptTarget.ES2022,
-      module: ts.ModuleKind.NodeNext,
-      moduleResolution: ts.ModuleResolutionKind.NodeNext,
-      lib: ["lib.es2022.d.ts", "lib.dom.d.ts"],
-      types: [],
-      strict: true,
-      noEmit: true,
-      skipLibCheck: true,
-    },
-  );
+function typeErrors(blocks: readonly Block[], strict: boolean): Map<string, string[]> {
+  // a package without types of its own
+  writeFileSync(`${FOLDER}untyped.d.ts`, 'declare module "culori";\n');
+  const files = blocks.map((block) => `${FOLDER}${block.id}.ts`);
+  const program = ts.createProgram([...files, `${FOLDER}untyped.d.ts`], {
+    target: ts.ScriptTarget.ES2022,
+    module: ts.ModuleKind.NodeNext,
+    moduleResolution: ts.ModuleResolutionKind.NodeNext,
+    lib: ["lib.es2022.d.ts", "lib.dom.d.ts"],
+    types: [],
+    strict,
+    noEmit: true,
+    skipLibCheck: true,
+  });
   const errors = new Map<string, string[]>();
   for (const { file, messageText } of ts.getPreEmitDiagnostics(program)) {
     const id = file?.fileName.slice(FOLDER.length, -3) ?? "";
@@ -48,8 +39,15 @@ function typeErrors(blocks: readonly Block[]): Map<string, string[]> {
 }
 
 const blocks = allBlocks();
-const results = runBlocks(blocks);
-const types = typeErrors(blocks);
+const results = runBlocks(blocks, FOLDER);
+const types = new Map(
+  [true, false].flatMap((strict) => [
+    ...typeErrors(
+      blocks.filter((block) => block.strict === strict),
+      strict,
+    ),
+  ]),
+);
 
 describe("every block a reader can copy", () => {
   it("is found", () => {
@@ -66,6 +64,8 @@ describe("every block a reader can copy", () => {
       expect(types.get(id) ?? []).toEqual([]);
       expect(results[id]!.errors).toEqual([]);
       if (where.startsWith("src/")) expect(results[id]!.checked).toBeGreaterThan(0);
+      const drawn = code.includes('"#picture"');
+      expect(results[id]!.picture).toMatch(drawn ? /<svg[^>]* aria-label="[^"]{40,}"/ : /^$/);
     },
   );
 });

@@ -255,6 +255,7 @@ describe("good input", () => {
         "calibration-lines.svg",
         "calibration-residuals.svg",
         "report.html",
+        "sky-spectra.svg",
         "sun-colours.svg",
         "sun-spectra.svg",
       ]);

@@ -1,0 +1,75 @@
+/** The explore page: sliders in, spectrum, colours, numbers and code out, at once. */
+import { codeFor } from "./codeFor.js";
+import { compute, prepare, type State } from "./compute.js";
+import { drawScene } from "./drawScene.js";
+import { drawSpectrum } from "./drawSpectrum.js";
+import { numbersOf } from "./numbersOf.js";
+
+const NAMES = ["heightDeg", "altitudeM", "ozoneDu", "haze", "co2Ppm"] as const;
+const UNITS: Readonly<Record<(typeof NAMES)[number], string>> = {
+  heightDeg: "°",
+  altitudeM: " m",
+  ozoneDu: " DU",
+  haze: "",
+  co2Ppm: " ppm",
+};
+
+const element = <T extends Element>(selector: string): T => document.querySelector<T>(selector)!;
+const fixed = prepare();
+
+function readState(): State {
+  const entries = NAMES.map((name) => [name, element<HTMLInputElement>(`#${name}`).valueAsNumber]);
+  return Object.fromEntries(entries) as State;
+}
+
+/** Brings the whole page to the state of the sliders. */
+function update(): void {
+  const state = readState();
+  const view = compute(state, fixed);
+  for (const name of NAMES) {
+    const text = `${state[name]}${UNITS[name]}`;
+    element(`output[for="${name}"]`).textContent = text;
+    element(`#${name}`).setAttribute("aria-valuetext", text);
+  }
+  drawScene(element("#scene"), state, view);
+  drawSpectrum(element("#spectrum"), fixed.outside, view.ground);
+  const rows = numbersOf(view).flatMap(([term, value]) => [cell("dt", term), cell("dd", value)]);
+  element("#numbers").replaceChildren(...rows);
+  element<HTMLTextAreaElement>("#code").value = codeFor(state, view);
+}
+
+function cell(tag: "dt" | "dd", text: string): HTMLElement {
+  const made = document.createElement(tag);
+  made.textContent = text;
+  return made;
+}
+
+/** Sliders from the address (#heightDeg=5&haze=0.2), so that a state can be passed on. */
+function readAddress(): void {
+  const wanted = new URLSearchParams(location.hash.slice(1));
+  for (const name of NAMES) {
+    const value = wanted.get(name);
+    if (value !== null) element<HTMLInputElement>(`#${name}`).value = value;
+  }
+}
+
+function keepAddress(): void {
+  const entries = Object.entries(readState()).map(([name, value]) => [name, String(value)]);
+  history.replaceState(null, "", `#${new URLSearchParams(entries)}`);
+}
+
+const form = element<HTMLFormElement>("form");
+form.addEventListener("input", update);
+form.addEventListener("change", keepAddress);
+form.addEventListener("submit", (event) => event.preventDefault());
+form.addEventListener("reset", () => setTimeout(update));
+addEventListener("hashchange", () => {
+  readAddress();
+  update();
+});
+element("#copy").addEventListener("click", async () => {
+  await navigator.clipboard.writeText(element<HTMLTextAreaElement>("#code").value);
+  element("#copied").textContent = "copied";
+});
+readAddress();
+update();
