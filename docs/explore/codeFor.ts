@@ -1,18 +1,41 @@
 /** The code that produces the state shown on the explore page, for copying. */
 import type { State, View } from "./compute.js";
+import { GROUND_ALBEDO } from "./skyArc.js";
+
+/** The lines about the sky overhead. */
+function skyCode({ heightDeg, ozoneDu, co2Ppm }: State, view: View): string {
+  if (view.zenithLuminance === undefined) return "";
+  return `
+const overhead = tabulate((nm) => {
+  const air = rayleighOpticalDepth(nm, column);
+  const layers = [
+    { rayleighDepth: 0.1 * air, absorptionDepth: ozoneOpticalDepth(nm, ${ozoneDu}, 228) },
+    { rayleighDepth: 0.9 * air, absorptionDepth: 0 },
+  ];
+  const sky = prepareSky({ layers, depolarisation: depolarisation(nm, ${co2Ppm}), groundAlbedo: ${GROUND_ALBEDO}, streams: 16 });
+  const up = { viewZenithDeg: 0, relativeAzimuthDeg: 0, at: "ground" };
+  return skyRadiance(illuminateSky(sky, 90 - ${heightDeg}), up, solarIrradiance(nm));
+}, wavelengthGrid(400, 700, 20));
+const [zenithX, zenithY, zenithZ] = spectrumToXyz(overhead, cie1931Observer5nm);
+zenithY; // => ${view.zenithLuminance.toPrecision(5)}
+srgbHex(encodeSrgb(fitToDisplay(xyzToLinearSrgb([zenithX / zenithY, 1, zenithZ / zenithY])))); // => "${view.zenithColour}"
+`;
+}
 
 /** A module that works out what the page shows; its comments hold the values shown. */
 export function codeFor(state: State, view: View): string {
   const { heightDeg, altitudeM, ozoneDu, haze, co2Ppm } = state;
   return `import {
-  airColumn, beamIrradiance, cie1931Observer5nm, clearBeam, encodeSrgb, fitToDisplay, spectrumToXyz,
-  srgbHex, standardAtmosphere, tabulate, wavelengthGrid, xyzToLinearSrgb,
+  airColumn, beamIrradiance, cie1931Observer5nm, clearBeam, depolarisation, encodeSrgb, fitToDisplay,
+  illuminateSky, ozoneOpticalDepth, prepareSky, rayleighOpticalDepth, skyRadiance, solarIrradiance,
+  spectrumToXyz, srgbHex, standardAtmosphere, tabulate, wavelengthGrid, xyzToLinearSrgb,
 } from "airlight";
 
 const altitudeM = ${altitudeM};
 const { pressurePa } = standardAtmosphere(altitudeM);
+const column = airColumn({ pressurePa, altitudeM, latitudeDeg: 45, co2Ppm: ${co2Ppm} });
 const beam = clearBeam({
-  column: airColumn({ pressurePa, altitudeM, latitudeDeg: 45, co2Ppm: ${co2Ppm} }),
+  column,
   trueZenithDeg: 90 - ${heightDeg},
   ozoneDu: ${ozoneDu}, ozoneTemperatureK: 228, ozoneHeightM: 22000, nitrogenDioxideDu: 0.1, waterCm: 1.4,
   aerosol: { opticalDepth: ${haze}, referenceNm: 500, exponent: 1.3 },
@@ -23,5 +46,5 @@ const ground = tabulate((nm) => beamIrradiance(nm, beam, 1), wavelengthGrid(300,
 const [X, Y, Z] = spectrumToXyz(ground, cie1931Observer5nm);
 Y; // => ${view.illuminanceLx.toPrecision(5)}
 srgbHex(encodeSrgb(fitToDisplay(xyzToLinearSrgb([X / Y, 1, Z / Y])))); // => "${view.sunColour}"
-`;
+${skyCode(state, view)}`;
 }

@@ -10,6 +10,7 @@ import {
   fitToDisplay,
   integrateSpectrum,
   moistAir,
+  type PreparedSky,
   refractiveIndexCiddor,
   type Spectrum,
   solarIrradiance,
@@ -21,6 +22,7 @@ import {
   type Xyz,
   xyzToLinearSrgb,
 } from "airlight";
+import { ARC_DEG, prepareArc, skyArc } from "./skyArc.js";
 
 /** Where the sliders stand. */
 export interface State {
@@ -61,6 +63,12 @@ export interface View {
   readonly sunColour: string;
   /** Slant optical depths at 550 nm. */
   readonly depths: { readonly air: number; readonly ozone: number; readonly aerosol: number };
+  /** Sky along the arc of `ARC_DEG`: display colours, all at one exposure; undefined for a sun too low. */
+  readonly skyColours: readonly string[] | undefined;
+  /** Of the sky overhead, cd/m². */
+  readonly zenithLuminance: number | undefined;
+  /** Display colour of the sky overhead at full brightness. */
+  readonly zenithColour: string | undefined;
   /** (n - 1) × 1e6 at 550 nm at the site. */
   readonly refractivity: number;
 }
@@ -85,8 +93,32 @@ function temperatureOf(xyz: Xyz): number | undefined {
   }
 }
 
-/** Everything the page shows of a state. */
-export function compute(state: State, fixed: Fixed): View {
+/** Display colour at an exposure: luminance `white` becomes the brightest white. */
+function exposedColour([X, Y, Z]: Readonly<Xyz>, white: number): string {
+  return srgbHex(encodeSrgb(fitToDisplay(xyzToLinearSrgb([X / white, Y / white, Z / white]))));
+}
+
+/** What the page shows of the sky. */
+function skyOf(
+  { heightDeg }: State,
+  skies: readonly PreparedSky[],
+): Pick<View, "skyColours" | "zenithLuminance" | "zenithColour"> {
+  const arc = skyArc(skies, heightDeg);
+  const zenith = arc?.[ARC_DEG.indexOf(0)];
+  const white = Math.max(...(arc ?? []).map(([, Y]) => Y));
+  return {
+    skyColours: arc?.map((xyz) => exposedColour(xyz, white)),
+    zenithLuminance: zenith?.[1],
+    zenithColour: zenith && displayColour(zenith),
+  };
+}
+
+/** Everything the page shows of a state; `skies` from `prepareArc` of the same air. */
+export function compute(
+  state: State,
+  fixed: Fixed,
+  skies: readonly PreparedSky[] = prepareArc(state),
+): View {
   const { heightDeg, altitudeM, ozoneDu, haze, co2Ppm } = state;
   const { pressurePa, temperatureK } = standardAtmosphere(altitudeM);
   const beam = clearBeam({
@@ -114,6 +146,7 @@ export function compute(state: State, fixed: Fixed): View {
     colourTemperatureK: temperatureOf(xyz),
     sunColour: displayColour(xyz),
     depths: { air, ozone, aerosol },
+    ...skyOf(state, skies),
     refractivity: 1e6 * (refractiveIndexCiddor(550, here) - 1),
   };
 }

@@ -23,7 +23,7 @@ function axes(): string {
     (value) =>
       `<line class="axis" x1="${LEFT}" x2="${RIGHT}" y1="${y(value)}" y2="${y(value)}"/><text x="${LEFT - 8}" y="${y(value) + 5}" text-anchor="end">${value}</text>`,
   );
-  return `${up.join("")}${along.join("")}<text x="${RIGHT}" y="296" text-anchor="end">wavelength, nm; height: W m⁻² nm⁻¹</text>`;
+  return `${up.join("")}${along.join("")}<text x="${RIGHT}" y="306" text-anchor="end">wavelength, nm; height: W m⁻² nm⁻¹</text>`;
 }
 
 /** Draws both spectra. The frame is drawn once, the curves at every call. */

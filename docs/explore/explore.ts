@@ -4,6 +4,7 @@ import { compute, prepare, type State } from "./compute.js";
 import { drawScene } from "./drawScene.js";
 import { drawSpectrum } from "./drawSpectrum.js";
 import { numbersOf } from "./numbersOf.js";
+import { prepareArc } from "./skyArc.js";
 
 const NAMES = ["heightDeg", "altitudeM", "ozoneDu", "haze", "co2Ppm"] as const;
 const UNITS: Readonly<Record<(typeof NAMES)[number], string>> = {
@@ -22,10 +23,21 @@ function readState(): State {
   return Object.fromEntries(entries) as State;
 }
 
+let skies = prepareArc(readState());
+let skiesFor = "";
+
+/** The prepared sky of the state's air; the sun and the haze do not change it. */
+function skiesOf(state: State): typeof skies {
+  const key = [state.altitudeM, state.ozoneDu, state.co2Ppm].join();
+  if (key !== skiesFor) skies = prepareArc(state);
+  skiesFor = key;
+  return skies;
+}
+
 /** Brings the whole page to the state of the sliders. */
 function update(): void {
   const state = readState();
-  const view = compute(state, fixed);
+  const view = compute(state, fixed, skiesOf(state));
   for (const name of NAMES) {
     const text = `${state[name]}${UNITS[name]}`;
     element(`output[for="${name}"]`).textContent = text;

@@ -15,6 +15,10 @@ export function numbersOf(view: View): [name: string, value: string][] {
     ["Ozone mass", view.ozoneMass.toFixed(3)],
     ["Illuminance, facing the sun", `${digits(view.illuminanceLx)} lx`],
     ["Illuminance, level ground", `${digits(view.levelLx)} lx`],
+    [
+      "Luminance of the sky overhead",
+      view.zenithLuminance === undefined ? "not computed" : `${digits(view.zenithLuminance)} cd/m²`,
+    ],
     ["Irradiance, 300 to 1100 nm", `${digits(view.irradiance)} W/m²`],
     [
       "Colour temperature",

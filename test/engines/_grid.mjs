@@ -39,6 +39,7 @@ export function gridOf(a) {
   const surface = { pressurePa: 95000, temperatureK: 280 };
   return {
     ...pathGrid(a, zenith),
+    ...skyGrid(a),
     ...readingGrid(a, beam),
     ...uncertaintyGrid(a),
     airColumn: () => sites.map(a.airColumn),
@@ -181,6 +182,46 @@ function pathGrid(a, zenith) {
     standardProfile: () => [profile],
     tabulatedLayer: () => [a.tabulatedLayer(smoke)],
     tabulatedProfile: () => [a.tabulatedProfile(rows)],
+  };
+}
+
+/** The polarised sky. */
+function skyGrid(a) {
+  const layers = [
+    { rayleighDepth: 0.02, absorptionDepth: 0.03 },
+    { rayleighDepth: 0.3, absorptionDepth: 0 },
+  ];
+  const sky = a.prepareSky({ layers, depolarisation: 0.0279, groundAlbedo: 0.2 });
+  const lit = a.illuminateSky(sky, 70);
+  const views = each([0, 30, 80], [0, 60, 180], (viewZenithDeg, relativeAzimuthDeg) => ({
+    viewZenithDeg,
+    relativeAzimuthDeg,
+    at: "ground",
+  }));
+  const stokes = views.map((view) => a.skyStokes(lit, view));
+  const dusk = a.prepareTwilight({
+    ...{ rayleighDepth: 0.2, ozoneDepth: 0.01, depolarisation: 0.0279 },
+    ...{ groundAlbedo: 0.1, altitudeM: 0, orders: "single" },
+  });
+  const zenithView = { viewZenithDeg: 20, relativeAzimuthDeg: 60 };
+  return {
+    angleOfPolarisation: () => stokes.map(a.angleOfPolarisation),
+    degreeOfPolarisation: () => stokes.map(a.degreeOfPolarisation),
+    illuminateSky: () => [lit.groundRadiance, lit.diffuseFluxes],
+    neutralPoints: () => [a.neutralPoints(lit)],
+    prepareSky: () => [sky.sphericalAlbedo],
+    prepareTwilight: () => [a.twilightStokes(dusk, { ...zenithView, sunZenithDeg: 91 })],
+    rayleighPhaseMode: () => [0, 1, 2].map((mode) => a.rayleighPhaseMode(mode, 0.3, -0.6, 0.03)),
+    rayleighScatteringMatrix: () =>
+      spread(0, 180, 13).map((t) => a.rayleighScatteringMatrix(t, 0.03)),
+    skyFluxes: () => [a.skyFluxes(lit)],
+    skyRadiance: () => views.map((view) => a.skyRadiance(lit, view, 1.5)),
+    skyStokes: () => stokes,
+    skyStokesMap: () => [
+      a.skyStokesMap(lit, { viewZenithsDeg: [10, 60], relativeAzimuthsDeg: [0, 90], at: "ground" }),
+    ],
+    twilightStokes: () =>
+      [90, 93, 96].map((sunZenithDeg) => a.twilightStokes(dusk, { ...zenithView, sunZenithDeg })),
   };
 }
 

@@ -45,6 +45,9 @@ describe("the state shown", () => {
     expect(of({ altitudeM: 3000 }).irradiance).toBeGreaterThan(start.irradiance);
     expect(of({ haze: 0.3 }).irradiance).toBeLessThan(start.irradiance);
     expect(of({ ozoneDu: 500 }).depths.ozone / start.depths.ozone).toBeCloseTo(500 / 320, 12);
+    expect(of({ heightDeg: 1 }).skyColours).toBeUndefined();
+    expect(start.zenithColour).toMatch(/^#[0-9a-f]{4}ff$/); // blue leads
+    expect(of({ altitudeM: 5000 }).zenithLuminance!).toBeLessThan(start.zenithLuminance!);
     expect(of({ co2Ppm: 1000 }).refractivity).toBeGreaterThan(start.refractivity);
     expect(of({ heightDeg: 0 }).colourTemperatureK ?? 0).toBeLessThan(start.colourTemperatureK!);
   });
