@@ -1,4 +1,7 @@
 /** Guards that throw: TypeError for the wrong kind, RangeError for an impossible value, both saying what to do. */
+import { refuse, show } from "./_refuse.js";
+
+export { refuse } from "./_refuse.js";
 
 /** Throws unless `value` is a number in [low, high]; `unit` is printed after the range ("" for none). */
 export function checkNumber(
@@ -53,24 +56,6 @@ export function checkList(
   throw new RangeError(
     `${functionName}: ${argument} needs at least ${least} values, got ${value.length}`,
   );
-}
-
-/** Throws the error for a value outside `range` (a text with its unit); `hint` names a likely slip. */
-export function refuse(
-  value: unknown,
-  range: string,
-  hint: string,
-  argument: string,
-  functionName: string,
-): never {
-  const text = `${functionName}: ${argument} must be ${range}, got ${show(value)}${hint && ` (${hint})`}`;
-  throw typeof value === "number" ? new RangeError(text) : new TypeError(text);
-}
-
-function show(value: unknown): string {
-  if (typeof value === "string") return `the text "${value}"`;
-  if (Array.isArray(value)) return `an array of ${value.length}`;
-  return typeof value === "object" && value !== null ? "an object" : String(value);
 }
 
 /** The likely slip behind a value out of range: the unit people mix up with `unit`, if converting it would fit. */

@@ -31,7 +31,7 @@ export function spectrumToXyz(spectrum: Spectrum, observer: Observer): Xyz {
   const { wavelengthsNm, values } = spectrum ?? {};
   const last = wavelengthsNm?.length - 1;
   if (!(values?.length === last + 1 && observer?.stepNm > 0)) {
-    throw new TypeError("spectrumToXyz: needs a spectrum and an observer like cie1931Observer");
+    throw new TypeError("spectrumToXyz: needs a spectrum and an observer");
   }
   if (!(wavelengthsNm[0]! <= 400 && wavelengthsNm[last]! >= 700)) {
     throw new RangeError(

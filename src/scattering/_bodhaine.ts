@@ -1,13 +1,12 @@
 /** Pieces of the Rayleigh cross-section of Bodhaine et al. 1999, unguarded. */
 import { peckReederRefractivity } from "../air/_peckReeder.js";
 
-/** King factors of nitrogen and oxygen (Bates 1984), argon and carbon dioxide (Bodhaine et al. 1999, equations 5, 6, text). */
+/** King factors of nitrogen and oxygen (Bates 1984) and carbon dioxide; argon's is 1 (Bodhaine et al. 1999, equations 5, 6, text). */
 const N2_0 = 1.034;
 const N2_1 = 3.17e-4; // µm2
 const O2_0 = 1.096;
 const O2_1 = 1.385e-3; // µm2
 const O2_2 = 1.448e-4; // µm4
-const ARGON = 1;
 const CO2 = 1.15;
 /** Parts per hundred by volume (equation 23). */
 const SHARE_N2 = 78.084;
@@ -26,7 +25,7 @@ export function kingFactorOf(s: number, co2Ppm: number): number {
   const co2Percent = co2Ppm * 1e-4;
   const n2 = SHARE_N2 * (N2_0 + N2_1 * s);
   const o2 = SHARE_O2 * (O2_0 + s * (O2_1 + s * O2_2));
-  const rest = SHARE_ARGON * ARGON + co2Percent * CO2;
+  const rest = SHARE_ARGON + co2Percent * CO2;
   return (n2 + o2 + rest) / (SHARE_N2 + SHARE_O2 + SHARE_ARGON + co2Percent);
 }
 
@@ -36,7 +35,6 @@ export function crossSectionOf(wavelengthNm: number, co2Ppm: number): number {
   const n = 1 + peckReederRefractivity(s) * (1 + CO2_INDEX * (co2Ppm * 1e-6 - CO2_REFERENCE));
   const n2 = n * n;
   const ratio = (n2 - 1) / (n2 + 2);
-  const wavenumber2 = s * 1e12; // m-2
-  const perDensity = (ratio * wavenumber2) / NUMBER_DENSITY;
+  const perDensity = (ratio * s * 1e12) / NUMBER_DENSITY; // s in m-2
   return GEOMETRY * perDensity * perDensity * kingFactorOf(s, co2Ppm);
 }

@@ -1,7 +1,7 @@
 /** Depolarisation factor of dry air for natural light. */
-import { checkNumber } from "../_check.js";
 import type { Dimensionless, Nanometres, PartsPerMillion } from "../units.js";
 import { kingFactorOf } from "./_bodhaine.js";
+import { checkGas } from "./_checkGas.js";
 
 /**
  * Depolarisation factor of dry air for natural (unpolarised) incident light: weak over strong component at 90°.
@@ -20,8 +20,7 @@ import { kingFactorOf } from "./_bodhaine.js";
  * depolarisation(550, 360); // => 0.02832
  */
 export function depolarisation(wavelengthNm: Nanometres, co2Ppm: PartsPerMillion): Dimensionless {
-  checkNumber(wavelengthNm, 230, 1690, "nm", "wavelengthNm", "depolarisation");
-  checkNumber(co2Ppm, 0, 2000, "ppm", "co2Ppm", "depolarisation");
+  checkGas(wavelengthNm, co2Ppm, "depolarisation");
   const king = kingFactorOf(1e6 / (wavelengthNm * wavelengthNm), co2Ppm);
   return (6 * (king - 1)) / (3 + 7 * king);
 }

@@ -1,7 +1,7 @@
 /** King factor of dry air. */
-import { checkNumber } from "../_check.js";
 import type { Dimensionless, Nanometres, PartsPerMillion } from "../units.js";
 import { kingFactorOf } from "./_bodhaine.js";
+import { checkGas } from "./_checkGas.js";
 
 /**
  * King factor of dry air: how much the molecules' anisotropy raises their scattering, (6 + 3 ρ) / (6 - 7 ρ).
@@ -20,7 +20,6 @@ import { kingFactorOf } from "./_bodhaine.js";
  * kingFactor(550, 360); // => 1.04882
  */
 export function kingFactor(wavelengthNm: Nanometres, co2Ppm: PartsPerMillion): Dimensionless {
-  checkNumber(wavelengthNm, 230, 1690, "nm", "wavelengthNm", "kingFactor");
-  checkNumber(co2Ppm, 0, 2000, "ppm", "co2Ppm", "kingFactor");
+  checkGas(wavelengthNm, co2Ppm, "kingFactor");
   return kingFactorOf(1e6 / (wavelengthNm * wavelengthNm), co2Ppm);
 }

@@ -1,7 +1,7 @@
 /** Rayleigh scattering cross-section of air. */
-import { checkNumber } from "../_check.js";
 import type { Nanometres, PartsPerMillion, SquareMetres } from "../units.js";
 import { crossSectionOf } from "./_bodhaine.js";
+import { checkGas } from "./_checkGas.js";
 
 /**
  * Rayleigh scattering cross-section of one molecule of dry air.
@@ -23,7 +23,6 @@ export function rayleighCrossSection(
   wavelengthNm: Nanometres,
   co2Ppm: PartsPerMillion,
 ): SquareMetres {
-  checkNumber(wavelengthNm, 230, 1690, "nm", "wavelengthNm", "rayleighCrossSection");
-  checkNumber(co2Ppm, 0, 2000, "ppm", "co2Ppm", "rayleighCrossSection");
+  checkGas(wavelengthNm, co2Ppm, "rayleighCrossSection");
   return crossSectionOf(wavelengthNm, co2Ppm);
 }

@@ -8,7 +8,8 @@ import type { Nanometres } from "../units.js";
  * Model: start + i step, so that rounding does not add up; the stop belongs to the grid when it lies on it to a billionth
  * of a step, otherwise the last wavelength is the last one below it.
  * Validity: 1 to 1e9 nm, at most 10 million wavelengths, enforced.
- * Accuracy: each wavelength is start + i step rounded once or twice (1 ulp, tested).
+ * Accuracy: each wavelength is start + i step rounded once or twice (1 ulp, tested);
+ * a last one that meets the stop may be a billionth of a step short.
  * Source: arithmetic.
  *
  * @param startNm - first wavelength, 1 to 1e9 nm

@@ -1,15 +1,9 @@
 /** The size of an import in a consumer's bundle. Plain JavaScript: shared by the tests and the script that prints the sizes. */
-import { gzipSync } from "node:zlib";
 import { build } from "esbuild";
 
 /** Minified bytes of a module that imports `names` from `specifier` and keeps them; `folder` resolves the package. */
 export async function bundleBytes(folder, specifier, names) {
   return (await bundleCode(folder, specifier, names)).length;
-}
-
-/** The same after gzip, as a server sends it. */
-export async function sentBytes(folder, specifier, names) {
-  return gzipSync(await bundleCode(folder, specifier, names), { level: 9 }).length;
 }
 
 async function bundleCode(folder, specifier, names) {
