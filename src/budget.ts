@@ -1,4 +1,4 @@
-/** What every result with an uncertainty carries: how it adds up. */
+/** What every result with an uncertainty carries: how it adds up. @module budget */
 
 /** One line of a budget: what one input does to the result. */
 export interface BudgetRow {

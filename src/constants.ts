@@ -1,4 +1,4 @@
-/** Physical constants: CODATA 2018/2022 (the exact ones are the same in both) and IAU resolutions. */
+/** Physical constants: CODATA 2018/2022 (the exact ones are the same in both) and IAU resolutions. @module constants */
 
 /** Speed of light in vacuum, m s⁻¹, exact (SI 2019). */
 export const SPEED_OF_LIGHT = 299792458;

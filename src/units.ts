@@ -1,4 +1,4 @@
-/** Unit aliases: every number in a public signature is written as one of these; they add no code. */
+/** Unit aliases: every number in a public signature is written as one of these; they add no code. @module units */
 
 /** Vacuum wavelength in nanometres (nm). */
 export type Nanometres = number;

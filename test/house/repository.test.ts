@@ -42,7 +42,7 @@ describe("the repository", () => {
       "(/" + "root/.x",
     ])
       expect(PRIVATE.test(text), text).toBe(true);
-    for (const text of ["examples/work/x", "W m-2/tmp", "../shared/home/"])
+    for (const text of ["examples/tmpfile", "W m-2/tmp", "../shared/home/"])
       expect(PRIVATE.test(text), text).toBe(false);
   });
 
