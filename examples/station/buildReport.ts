@@ -106,14 +106,14 @@ function styleSheet(lines: number): string {
 @media (prefers-color-scheme:dark){:root{--paper:#161a1f;--ink:#e2e6ea;--faint:#9aa5b1;--edge:#39424c;--warn:#2c2415;--warnedge:#c98e3a;${darkLines.join("")}}}
 *{box-sizing:border-box}
 body{margin:0;background:var(--paper);color:var(--ink);font:16px/1.55 "DejaVu Sans",Verdana,sans-serif}
-main{max-width:808px;margin:0 auto;padding:16px 24px 64px}
+main{max-width:880px;margin:0 auto;padding:16px 24px 64px}
 h1{font-size:1.6em;line-height:1.2}h2{font-size:1.2em;margin:2em 0 .5em}
 .about{border-left:4px solid var(--warnedge);padding:.2em 0 .2em 1em;font-weight:bold}
 .caution{background:var(--warn);border:1px solid var(--warnedge);border-radius:6px;padding:.2em 1.2em}.caution h2{margin:.6em 0 0}
 ul{padding-left:1.2em}li{margin:.4em 0}dt{font-weight:bold;margin-top:.8em}dd{margin:0}
 .caption{color:var(--faint);font-size:.85em;margin:1.2em 0 .4em}.table{overflow-x:auto;margin:0 0 1em}
 table{border-collapse:collapse;font-size:.85em;font-variant-numeric:tabular-nums;width:100%}
-th,td{text-align:right;padding:.3em .6em;border-bottom:1px solid var(--edge);white-space:nowrap}
+th,td{text-align:right;padding:.3em .5em;border-bottom:1px solid var(--edge);white-space:nowrap}
 th{font-weight:bold;vertical-align:top;white-space:normal}th small{display:block;font-weight:normal;color:var(--faint)}
 .patch{display:inline-block;width:1.4em;height:1em;margin-right:.5em;vertical-align:-.12em;border:1px solid var(--edge)}
 figure{margin:1.6em 0}figcaption{margin-top:.6em;color:var(--faint);font-size:.85em}

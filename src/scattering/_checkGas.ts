@@ -5,7 +5,9 @@ import { refuse } from "../_refuse.js";
 export function checkGas(wavelengthNm: unknown, co2Ppm: unknown, functionName: string): void {
   if (!(typeof wavelengthNm === "number" && wavelengthNm >= 230 && wavelengthNm <= 1690)) {
     const slip =
-      (wavelengthNm as number) > 0.2 && (wavelengthNm as number) < 2 ? "µm? multiply by 1000" : "";
+      (wavelengthNm as number) >= 0.23 && (wavelengthNm as number) <= 1.69
+        ? "µm? multiply by 1000"
+        : "";
     refuse(wavelengthNm, "230 to 1690 nm", slip, "wavelengthNm", functionName);
   }
   if (!(typeof co2Ppm === "number" && co2Ppm >= 0 && co2Ppm <= 2000)) {

@@ -138,6 +138,11 @@ describe("edges", () => {
     for (const nm of [229.9, 1690.1, Number.NaN])
       expectRefusal(() => quantity(nm, 400), RangeError, name, "230 to 1690 nm", String(nm));
     expectRefusal(() => quantity(0.55, 400), RangeError, "µm? multiply by 1000");
+    // the slip is named exactly where a thousand times the value would be in range
+    for (const um of [0.23, 1.69])
+      expectRefusal(() => quantity(um, 400), RangeError, `got ${um} (µm? multiply by 1000)`);
+    for (const um of [0.2299, 1.6901])
+      expect(() => quantity(um, 400)).toThrow(new RegExp(`got ${um}$`));
     expectRefusal(() => quantity(550, 2001), RangeError, "co2Ppm", "0 to 2000 ppm", "2001");
     expectRefusal(() => quantity(550, Number.NaN), RangeError, "co2Ppm");
     expectRefusal(() => quantity("550" as never, 400), TypeError, name);
