@@ -9,7 +9,8 @@ import { normalGravity } from "./_gravity.js";
  * Model: Somigliana's closed form on the WGS 84 ellipsoid, free air to second order in height.
  * Validity: -5 to 86 km, enforced; height above sea level taken for height above the ellipsoid (up to 100 m apart, 3e-5).
  * Real gravity differs by local anomalies of some 1e-5 to 3e-4 (from memory).
- * Accuracy: 1e-10 against the ellipsoid's own equator, 45° and pole values; 1e-5 against an inverse-square field at 86 km.
+ * Accuracy: 1.5e-10 m s⁻² against the ellipsoid's own equator and pole values; 1.2e-5 relative against the field of mass, bulge and
+ * spin at the equator, to 86 km.
  * Source: WGS 84 (NIMA TR8350.2, third edition, equations 4-1 to 4-3, from memory).
  *
  * @param latitudeDeg - geodetic latitude, -90 to 90°

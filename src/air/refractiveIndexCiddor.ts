@@ -10,7 +10,7 @@ import type { MoistAir } from "./moistAir.js";
  * Model: densities of dry air and vapour times their dispersions, added (density-proportional mixing; the Lorentz-Lorenz
  * form differs by up to 0.97e-8).
  * Validity: 300-1690 nm, enforced; state as `moistAir`. Published for -40 to 100 °C, 80 to 120 kPa, CO2 0 to 2000 ppm.
- * Accuracy: 5e-12 of n against the table of the paper rounded at 1e-9; the author states an uncertainty of 2 to 5e-8.
+ * Accuracy: 5e-10 of n against the paper's table (half of its last digit), 1e-11 against the formula by absolute densities; the author states an uncertainty of 2 to 5e-8.
  * Source: Ciddor 1996, Appl. Opt. 35, 1566, equations 1-5.
  *
  * @param wavelengthNm - vacuum wavelength, 300 to 1690 nm

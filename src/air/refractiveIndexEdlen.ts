@@ -26,7 +26,7 @@ const PASCALS_PER_TORR = 133.32236842105263;
  * Model: two-pole dispersion, density by a virial expansion, vapour as a shift proportional to its pressure.
  * Validity: 200-2000 nm, enforced, as published; laboratory air near 20 °C.
  * Accuracy: within 2.1e-7 of `refractiveIndexCiddor` (450 ppm) for 350-650 nm, 10-30 °C, 90-110 kPa, humidity 0-0.6
- * (its vapour term is 15 % too strong); 2e-8 dry.
+ * (its vapour term is 15 % too strong); 3e-8 dry.
  * Source: Edlén 1966, Metrologia 2, 71, equations 1, 12 and 22 (from memory).
  *
  * @param wavelengthNm - vacuum wavelength, 200 to 2000 nm

@@ -21,7 +21,7 @@ export interface StandardState {
  * Model: seven layers of constant gradient of molecular-scale temperature in geopotential height, hydrostatic; above 80 km
  * the kinetic temperature is lower by the ratio of molar masses. A dry, mid-latitude annual mean, not today's weather.
  * Validity: geometric height -5 to 86 km, enforced.
- * Accuracy: 5e-6 relative against the standard's printed rows (their own digits); 1e-9 against the hydrostatic integral.
+ * Accuracy: the standard's printed rows to their five digits, up to 5e-5 relative; 1e-9 against the hydrostatic integral.
  * Source: US Standard Atmosphere 1976 (NOAA, NASA, USAF), sections 1.2-1.3, tables 4 and 8 (constants from memory).
  *
  * @param altitudeM - geometric height above mean sea level, -5000 to 86 000 m

@@ -4,7 +4,7 @@ import { standardState } from "../air/_standardLayers.js";
 
 /** Top of the standard atmosphere, m; leaving out the 4e-6 of the mass above it changes the mean by 1e-7. */
 const TOP_M = 86_000;
-/** Slices between the site and the top, each with three Gauss-Legendre nodes: 1e-9 of the mean. */
+/** Slices between the site and the top, each with three Gauss-Legendre nodes: 1e-7 of the mean (the profile has kinks). */
 const SLICES = 43;
 const NODE = 0.7745966692414834; // sqrt(3/5), half-widths from the middle
 const WEIGHT_SIDE = 5;

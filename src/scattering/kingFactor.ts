@@ -8,7 +8,7 @@ import { checkGas } from "./_checkGas.js";
  *
  * Model: the gases' own factors averaged by volume.
  * Validity: 230-1690 nm (enforced; published to 230 nm); CO2 0 to 2000 ppm.
- * Accuracy: 1e-4 against the table of Bates 1984 at 400, 500, 550 and 700 nm (its digits); 1e-12 against the formula written apart.
+ * Accuracy: 5e-4 against the table of Bates 1984 at 400, 500, 550 and 700 nm (its digits); 1e-12 against the formula written apart.
  * Source: Bodhaine, Wood, Dutton & Slusser 1999, J. Atmos. Ocean. Technol. 16, 1854, equations 5, 6 and 23; after Bates 1984.
  *
  * @param wavelengthNm - vacuum wavelength, 230 to 1690 nm
