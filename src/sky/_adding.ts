@@ -1,5 +1,5 @@
 /** Layers put together by their reflection and transmission at the nodes (the adding method). */
-import { identity, inverse, product } from "./_matrix.js";
+import { inverse, product } from "./_matrix.js";
 import type { LayerModes } from "./_layerModes.js";
 
 /** A layer between what lies above and below it. All matrices act on the scaled fields at the nodes, row by row. */
@@ -21,25 +21,31 @@ export function joinLayers(layers: readonly LayerModes[], secants: Float64Array)
   let below: Float64Array = new Float64Array(0);
   for (let l = layers.length - 1; l >= 0; l--) {
     const { reflection, transmission } = responses(layers[l]!, secants);
-    let bounces: Float64Array = new Float64Array(0);
-    let whole = reflection;
-    if (below.length > 0) {
-      const once = product(reflection, below, size);
-      bounces = inverse(
-        identity(size).map((one, i) => one - once[i]!),
-        size,
-      );
-      const back = product(
-        product(transmission, below, size),
-        product(bounces, transmission, size),
-        size,
-      );
-      whole = reflection.map((own, i) => own + back[i]!);
-    }
-    joins.unshift({ reflection, transmission, below, bounces });
-    below = whole;
+    const bounces = below.length > 0 ? allBounces(reflection, below, size) : below;
+    const join = { reflection, transmission, below, bounces };
+    joins.unshift(join);
+    if (l > 0) below = pileReflection(join, size); // nothing lies on the uppermost
   }
   return joins;
+}
+
+/** (1 - reflection below)⁻¹. */
+function allBounces(reflection: Float64Array, below: Float64Array, size: number): Float64Array {
+  const left = product(reflection, below, size);
+  for (let i = 0; i < left.length; i++) left[i] = -left[i]!;
+  for (let i = 0; i < size; i++) left[i * size + i]! += 1;
+  return inverse(left, size);
+}
+
+/** Reflection of a layer and everything below it. */
+function pileReflection(
+  { reflection, transmission, below, bounces }: Join,
+  size: number,
+): Float64Array {
+  if (below.length === 0) return reflection;
+  const through = product(bounces, transmission, size);
+  const back = product(product(transmission, below, size), through, size);
+  return reflection.map((own, i) => own + back[i]!);
 }
 
 /** A layer's reflection and transmission: the sum and difference of its answers to even and odd illumination. */
@@ -73,11 +79,16 @@ function answer(factor: Float64Array, vectors: Float64Array, secants: Float64Arr
     for (let j = 0; j < size; j++) half[m * size + j]! *= scale;
   }
   const whole = new Float64Array(size * size);
-  for (let m = 0; m < size; m++) {
-    for (let i = 0; i < size; i++) {
-      const part = half[m * size + i]! * secants[i]!;
-      for (let j = 0; j < size; j++) whole[i * size + j]! += part * half[m * size + j]!;
+  for (let i = 0; i < size; i++) {
+    for (let m = 0; m < size; m++) {
+      const part = half[m * size + i]!;
+      for (let j = 0; j <= i; j++) whole[i * size + j]! += part * half[m * size + j]!;
     }
+    for (let j = 0; j < i; j++) {
+      whole[j * size + i] = whole[i * size + j]! * secants[j]!;
+      whole[i * size + j]! *= secants[i]!;
+    }
+    whole[i * size + i]! *= secants[i]!;
   }
   return whole;
 }

@@ -35,23 +35,24 @@ export function apply(
   return result;
 }
 
-/** Inverse by elimination without exchange of rows: for matrices near the unit matrix (1 less a reflection of norm below 1). */
+/**
+ * Inverse by elimination without exchange of rows: for matrices near the unit matrix (1 less a reflection of norm below 1).
+ * Columns already eliminated are left as they are in `work`; those not yet reached are still zero in the result.
+ */
 export function inverse(matrix: Float64Array, size: number): Float64Array {
   const work = matrix.slice();
   const result = identity(size);
   for (let p = 0; p < size; p++) {
-    const scale = 1 / work[p * size + p]!;
-    for (let j = 0; j < size; j++) {
-      work[p * size + j]! *= scale;
-      result[p * size + j]! *= scale;
-    }
+    const pivot = p * size;
+    const scale = 1 / work[pivot + p]!;
+    for (let j = p + 1; j < size; j++) work[pivot + j]! *= scale;
+    for (let j = 0; j <= p; j++) result[pivot + j]! *= scale;
     for (let i = 0; i < size; i++) {
       if (i === p) continue;
-      const part = work[i * size + p]!;
-      for (let j = 0; j < size; j++) {
-        work[i * size + j]! -= part * work[p * size + j]!;
-        result[i * size + j]! -= part * result[p * size + j]!;
-      }
+      const row = i * size;
+      const part = work[row + p]!;
+      for (let j = p + 1; j < size; j++) work[row + j]! -= part * work[pivot + j]!;
+      for (let j = 0; j <= p; j++) result[row + j]! -= part * result[pivot + j]!;
     }
   }
   return result;
