@@ -126,7 +126,7 @@ describe("edges", () => {
   it("takes both ends of its range and refuses what lies beyond", () => {
     expectAbsolute(correlatedColourTemperature(blackBody(1000)).temperatureK, 1000, 0.01);
     expectAbsolute(correlatedColourTemperature(blackBody(50_000)).temperatureK, 50_000, 0.01);
-    for (const temperatureK of [950, 999, 50_100, 80_000, 1e6]) {
+    for (const temperatureK of [950, 999, 999.98, 50_000.05, 50_100, 80_000, 1e6]) {
       expectRefusal(
         () => correlatedColourTemperature(blackBody(temperatureK)),
         RangeError,
@@ -134,10 +134,10 @@ describe("edges", () => {
         "chromaticity 0.",
       );
     }
-    expectAbsolute(correlatedColourTemperature(offLocus(4000, 0.0499)).duv, 0.0499, 1e-7);
-    expectAbsolute(correlatedColourTemperature(offLocus(4000, -0.0499)).duv, -0.0499, 1e-7);
-    expectRefusal(() => correlatedColourTemperature(offLocus(4000, 0.0501)), RangeError, "0.05");
-    expectRefusal(() => correlatedColourTemperature(offLocus(4000, -0.0501)), RangeError, "0.05");
+    expectAbsolute(correlatedColourTemperature(offLocus(4000, 0.04999)).duv, 0.04999, 1e-7);
+    expectAbsolute(correlatedColourTemperature(offLocus(4000, -0.04999)).duv, -0.04999, 1e-7);
+    expectRefusal(() => correlatedColourTemperature(offLocus(4000, 0.05003)), RangeError, "0.05");
+    expectRefusal(() => correlatedColourTemperature(offLocus(4000, -0.05003)), RangeError, "0.05");
   });
   it.each([
     ["deep blue", 0.15, 0.05],

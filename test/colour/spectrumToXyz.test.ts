@@ -198,6 +198,7 @@ describe("properties", () => {
         const all = Float64Array.from(lights.flatMap((l) => [...l.values]));
         const out = new Float64Array(3 * lights.length);
         expect(spectraToXyz(all, grid, cie1931Observer, out)).toBe(out);
+        expect(spectraToXyz(all, grid, cie1931Observer)).toEqual(out);
         lights.forEach((l, s) => {
           spectrumToXyz(l, cie1931Observer).forEach((v, i) => {
             expectRelative(out[3 * s + i]!, v, 1e-13);
@@ -328,6 +329,27 @@ describe("daylightIlluminant", () => {
       }),
     );
   });
+  it("is the published formula with M1 and M2 of three decimals, at 2600 temperatures", () => {
+    // CIE 15:2004, equations 3.1 to 3.4, in powers of T as printed there
+    const near7000 = Array.from({ length: 500 }, (_, i) => 6995 + 0.02 * i);
+    for (const T of [...wavelengthGrid(4000, 25_000, 10), ...near7000]) {
+      const x =
+        T <= 7000
+          ? -4.607e9 / T ** 3 + 2.9678e6 / T ** 2 + 0.09911e3 / T + 0.244063
+          : -2.0064e9 / T ** 3 + 1.9018e6 / T ** 2 + 0.24748e3 / T + 0.23704;
+      const y = -3 * x ** 2 + 2.87 * x - 0.275;
+      const m = 0.0241 + 0.2562 * x - 0.7341 * y;
+      const m1 = (1000 * (-1.3515 - 1.7703 * x + 5.9114 * y)) / m;
+      const m2 = (1000 * (0.03 - 31.4424 * x + 30.0717 * y)) / m;
+      if ([m1, m2].some((v) => Math.abs(v - Math.floor(v) - 0.5) < 1e-9)) continue; // a tie
+      const { values } = daylightIlluminant(T);
+      for (const i of [0, 30, 106]) {
+        const [s0, s1, s2] = [MEAN_COMPONENT, FIRST_COMPONENT, SECOND_COMPONENT].map((c) => c[i]!);
+        const expected = s0! + (Math.round(m1) / 1000) * s1! + (Math.round(m2) / 1000) * s2!;
+        expectAbsolute(values[i]!, expected, 1e-11);
+      }
+    }
+  });
   it("embeds the components as printed", () => {
     const printed = referenceTable("cie-daylight-components-5nm.csv");
     expect(MEAN_COMPONENT).toEqual(printed.S0);
@@ -388,6 +410,8 @@ describe("chromaticity", () => {
     expectRefusal(() => chromaticity([1, 1] as never), RangeError, "xyz", "3");
     expectRefusal(() => chromaticity([1, 1, 1, 1] as never), RangeError, "3 numbers, got 4");
     expectRefusal(() => chromaticity([1, "1", 1] as never), TypeError, "xyz[1]");
+    expectRefusal(() => chromaticity(["1", 1, 1] as never), TypeError, "xyz[0]");
+    expect(chromaticity([1e-4, 1e-4, 2e-4])).toEqual([0.25, 0.25]);
     expectRefusal(() => chromaticity(undefined as never), TypeError, "xyz");
   });
 });

@@ -203,6 +203,17 @@ describe("fitToDisplay", () => {
       }),
     );
   });
+  it("takes brightness away from a light a display is too weak for, all parts alike", () => {
+    for (const rgb of [
+      [1.5, 0.0005, 0.5],
+      [0.2, 1.0005, 0],
+    ] as const) {
+      const most = Math.max(...rgb);
+      fitToDisplay(rgb).forEach((part, i) => {
+        expectAbsolute(part, rgb[i]! / most, 1e-15);
+      });
+    }
+  });
   it("shows black as black, passes NaN on, and refuses bad input", () => {
     expect(fitToDisplay([0, 0, 0])).toEqual([0, 0, 0]);
     expect(fitToDisplay([Number.NaN, 0.5, 0.5])).toEqual([Number.NaN, Number.NaN, Number.NaN]);
@@ -243,7 +254,10 @@ describe("bad input and NaN", () => {
     expectRefusal(() => call(undefined as never), TypeError, name, argument);
     expectRefusal(() => call([1, 2] as never), RangeError, name, argument, "got 2");
     expectRefusal(() => call([0, 0, 0, 0] as never), RangeError, name, argument, "got 4");
-    expectRefusal(() => call([0, "1", 0] as never), TypeError, name, `${argument}[1]`);
+    for (const i of [0, 1, 2]) {
+      const three = [0, 1, 2].map((j) => (i === j ? "1" : 0));
+      expectRefusal(() => call(three as never), TypeError, name, `${argument}[${i}]`);
+    }
   });
   it("NaN keeps to its place where places are apart", () => {
     expect(encodeSrgb([Number.NaN, 1, 0])[0]).toBeNaN();

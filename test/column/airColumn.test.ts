@@ -62,8 +62,11 @@ describe("independent fixtures", () => {
       1e-6,
     );
   });
-  it("the shortcut written in cgs, as printed", () => {
-    const [z, lat, c] = [1620, 40, 425e-6];
+  it.each([
+    [1620, 40],
+    [20_000, 0],
+  ])("the shortcut written in cgs, as printed: %d m, latitude %d", (z, lat) => {
+    const c = 425e-6;
     const cos2 = Math.cos((2 * lat * Math.PI) / 180);
     const zc = 0.73737 * z + 5517.56;
     const g0 = 980.616 * (1 - 0.0026373 * cos2 + 0.0000059 * cos2 ** 2);

@@ -45,6 +45,7 @@ describe("wavelengthGrid", () => {
     expectRefusal(() => wavelengthGrid(400, 700, -1), RangeError, "stepNm", "-1");
     expectRefusal(() => wavelengthGrid(400, 700, Number.NaN), RangeError, "stepNm", "NaN");
     expectRefusal(() => wavelengthGrid(400, 700, 1e-9), RangeError, "stepNm", "10 million");
+    expectRefusal(() => wavelengthGrid(1, 10_000_001, 1), RangeError, "at least 1 nm here");
     expectRefusal(() => wavelengthGrid(400, 700, "5" as never), TypeError, "stepNm", '"5"');
     expectRefusal(() => wavelengthGrid(Number.NaN, 700, 5), RangeError, "startNm");
     expectRefusal(() => wavelengthGrid(400, 700, Number.POSITIVE_INFINITY), RangeError, "stepNm");

@@ -63,7 +63,17 @@ describe("integrateSpectrum", () => {
     expect(integrateSpectrum(holed, 400, 501)).toBeNaN();
     expect(integrateSpectrum(holed, 650, 700)).toBeNaN();
   });
+  it("takes any wavelength above zero", () => {
+    const short = spectrumOf([0.0005, 1], [2, 2]);
+    expectRelative(integrateSpectrum(short, 0.0005, 1), 1.999, 1e-15);
+  });
   it("refuses bad input", () => {
+    expectRefusal(
+      () => integrateSpectrum(spectrumOf([0, 500], [1, 1]), 400, 500),
+      RangeError,
+      "spectrum.wavelengthsNm[0]",
+      "above 0 nm",
+    );
     expectRefusal(
       () => integrateSpectrum(roof, 399, 500),
       RangeError,
@@ -184,6 +194,14 @@ describe("bandMean", () => {
         expectRelative(bandMean(wide, passband), sum / area, 1e-4); // midpoint rule at corners
       }),
       { numRuns: 30 },
+    );
+  });
+  it("takes a passband however narrow", () => {
+    const line = spectrumOf([400, 700], [4, 7]);
+    expectRelative(
+      bandMean(line, spectrumOf([500, 500.00005, 500.0001], [0, 1, 0])),
+      5.0000005,
+      1e-12,
     );
   });
   it("needs the spectrum only where the passband is not zero", () => {

@@ -81,6 +81,23 @@ describe("properties", () => {
   });
 });
 
+describe("shape", () => {
+  it("is one parabola in each band, from edge to edge", () => {
+    from_nm!.forEach((from, i) => {
+      const width = to_nm![i]! - from;
+      const [a, b, c] = [0.25, 0.5, 0.75].map((t) => solarIrradiance(from + t * width));
+      for (const t of [1e-3, 0.02, 0.98, 0.999]) {
+        const [p, q, r] = [
+          8 * (t - 0.5) * (t - 0.75),
+          -16 * (t - 0.25) * (t - 0.75),
+          8 * (t - 0.25) * (t - 0.5),
+        ];
+        expectRelative(solarIrradiance(from + t * width), p * a! + q * b! + r * c!, 1e-11);
+      }
+    });
+  });
+});
+
 describe("edges", () => {
   it("takes both ends and refuses what lies beyond", () => {
     expectRelative(solarIrradiance(280), (3 * recommended![0]! - recommended![1]!) / 2, 1e-12);
