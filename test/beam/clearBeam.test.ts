@@ -120,6 +120,8 @@ describe("edges", () => {
       "ozoneHeightM",
       "9001 to 100000 m",
     );
+    expectRefusal(() => clearBeam({ ...input, ozoneHeightM: 999 }), RangeError, "1000 to 100000 m");
+    expect(clearBeam({ ...input, ozoneHeightM: 1000 }).state.ozoneHeightM).toBe(1000);
     expectRefusal(() => clearBeam(undefined as never), TypeError, "clearBeam", "input");
     expectRefusal(() => beamAt({} as never, 30), TypeError, "beamAt", "clearBeam");
     expectRefusal(() => beamAt(beamAtZenith(30), 91), RangeError, "beamAt", "trueZenithDeg");

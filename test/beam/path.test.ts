@@ -15,7 +15,7 @@ import {
   standardProfile,
 } from "../../src/index.js";
 import { expectAbsolute, expectRefusal, expectRelative } from "../_tolerance.js";
-import { clearAir } from "./_states.js";
+import { clearAir, seaLevel } from "./_states.js";
 
 const input = {
   profile: standardProfile({
@@ -99,9 +99,17 @@ describe("edges", () => {
       () =>
         clearBeam({ ...onPath, trueZenithDeg: 60, ...fields });
     expectRefusal(make({ path: bare }), TypeError, "clearBeam", "water, aerosol missing");
+    for (const left of ["ozone", "water", "aerosol"]) {
+      const others = Object.entries(constituents).filter(([key]) => key !== left);
+      const short = preparePath({ ...input, constituents: Object.fromEntries(others) });
+      expectRefusal(make({ path: short }), TypeError, "clearBeam", `, ${left} missing`);
+    }
     expectRefusal(make({ path: {} }), TypeError, "preparePath or pathInWeather");
     const column = airColumn({ pressurePa: 95000, altitudeM: 540, latitudeDeg: 45, co2Ppm: 425 });
     expectRefusal(make({ column }), RangeError, "the column's altitude, 540 m, got 0 m");
+    const near = { ...seaLevel, altitudeM: 1.0005 };
+    expectRefusal(make({ column: near }), RangeError, "1.0005 m, got 0 m");
+    expect(make({ column: { ...seaLevel, altitudeM: 1 } })).not.toThrow();
     expectRefusal(make({ trueZenithDeg: 91 }), RangeError, "trueZenithDeg", "0 to 90.5", "91");
     const noon = clearBeam({ ...onPath, trueZenithDeg: 30 });
     expectRefusal(() => beamAt(noon, 91), RangeError, "beamAt", "0 to 90.5");
