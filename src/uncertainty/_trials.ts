@@ -56,10 +56,12 @@ export function budgetRow<Name extends string>(
     standardUncertainty > 0 ? steps.length : 2,
   );
   const { mean, standardDeviation: contribution } = moments(results);
+  const middle = moments(steps).mean;
   let [products, squares] = [0, 0];
   for (let i = 0; i < results.length; i++) {
-    products += steps[i]! * (results[i]! - mean);
-    squares += steps[i]! * steps[i]!;
+    const step = steps[i]! - middle;
+    products += step * (results[i]! - mean);
+    squares += step * step;
   }
   return {
     input: name,

@@ -98,6 +98,7 @@ function checkOptions<Name extends string>(
   if (typeof random !== "function") refuse(random, "a function", "", "random", "monteCarlo");
   checkNumber(coverage, 0.5, 0.999, "fraction", "coverage", "monteCarlo");
   checkNumber(digits, 1, 3, "", "digits", "monteCarlo");
+  if (!Number.isInteger(digits)) refuse(digits, "a whole number", "", "digits", "monteCarlo");
   checkNumber(mostTrials, 50_000, 1e8, "", "mostTrials", "monteCarlo");
   return { random, correlations, coverage, digits, mostTrials };
 }

@@ -96,7 +96,9 @@ function isCounter(node: ts.Node): boolean {
     if (ts.isForStatement(parent)) return parent.statement !== at;
     if (ts.isNewExpression(parent)) return true;
     if (ts.isCallExpression(parent))
-      return /\.(at|slice|subarray|toFixed|toString|padStart)$/.test(parent.expression.getText());
+      return /\.(at|slice|subarray|toFixed|toString|padStart|imul)$/.test(
+        parent.expression.getText(),
+      );
     if (ts.isBinaryExpression(parent)) {
       const other = (parent.left === at ? parent.right : parent.left).getText();
       if (

@@ -1,5 +1,8 @@
 import { describe, expect, it } from "vitest";
 import { monteCarlo, propagate, seededRandom } from "../../src/index.js";
+import { normalQuantile } from "../../src/_normalQuantile.js";
+import { prepareDraws } from "../../src/uncertainty/_draws.js";
+import { isStable } from "../../src/uncertainty/_stability.js";
 import { expectAbsolute, expectRefusal, expectRelative } from "../_tolerance.js";
 
 const root3 = Math.sqrt(3);
@@ -109,6 +112,38 @@ describe("independent fixtures", () => {
     expectAbsolute(result.interval[1], quantile, 0.01);
     expectAbsolute(result.interval[0], -quantile, 0.01);
   });
+  // the distribution functions, of mean 0 and standard deviation 1, undo the draws
+  it.each<["rectangular" | "triangular" | "arcsine", (x: number) => number]>([
+    ["rectangular", (x) => (x / root3 + 1) / 2],
+    ["triangular", (x) => 0.5 + (Math.sign(x) * (1 - (1 - Math.abs(x) / Math.sqrt(6)) ** 2)) / 2],
+    ["arcsine", (x) => 0.5 + Math.asin(x / Math.SQRT2) / Math.PI],
+  ])("draws the %s distribution to the last digits", (distribution, share) => {
+    const inputs = { x: { value: 0, standardUncertainty: 1, distribution } };
+    const draws = prepareDraws(["x"], inputs, []);
+    for (const u of [0.001, 0.1, 0.3, 0.4999, 0.5, 0.5003, 0.77, 0.999]) {
+      expectAbsolute(share(draws.one("x", () => u)), u, 1e-14);
+    }
+  });
+  it("draws a normal input at u = 0 as at half the least step of the numbers drawn", () => {
+    const lowest = monteCarlo(({ x }) => x, { x: unit("normal") }, { random: () => 0 });
+    expect(lowest.value).toBe(normalQuantile(2 ** -54));
+  });
+  it("takes the ends of its intervals from trials that lie at even steps", () => {
+    // every block is 0.5/10000, 1.5/10000 and so on: of 50 000 trials the middle 95 % start at number 1250
+    let i = 0;
+    const random = (): number => ((i++ % 10_000) + 0.5) / 10_000;
+    const inputs = {
+      x: { value: 10, standardUncertainty: 1, distribution: "rectangular" },
+    } as const;
+    const result = monteCarlo(({ x }) => x, inputs, { random });
+    expect(result.trials).toBe(50_000);
+    const at = (place: number): number => 10 + root3 * (2 * ((place + 0.5) / 10_000) - 1);
+    expectAbsolute(result.interval[0], at(250), 1e-13);
+    expectAbsolute(result.interval[1], at(9750), 1e-13);
+    // variance of the middles of 10 000 equal steps, counted with one less than 50 000
+    const variance = (1 - 1e-8) * (50_000 / 49_999);
+    expectRelative(result.standardUncertainty, Math.sqrt(variance), 1e-12);
+  });
   it("draws correlated normal inputs", () => {
     const input = { value: 1, standardUncertainty: 1 };
     const difference = (coefficient: number): number =>
@@ -126,7 +161,56 @@ describe("independent fixtures", () => {
   });
 });
 
+describe("when trials stop (Supplement 1, 7.9)", () => {
+  const block = {
+    mean: 0,
+    standardDeviation: 1,
+    interval: [-2, 2],
+    shortestInterval: [-2, 2],
+  } as const;
+  /** Six blocks whose `part` is `value` more in every other one. */
+  const swaying = (part: object): Parameters<typeof isStable>[0] =>
+    [block, part, block, part, block, part].map((own) => ({ ...block, ...own }));
+  // half a unit of the second digit of 1.0 is 0.05; of six values that sway by s the standard deviation is s (6/20)^½
+  const most = (0.05 / 2) * Math.sqrt(6) * Math.sqrt(20 / 6);
+  it.each([
+    ["mean", (s: number) => ({ mean: s })],
+    ["lower end", (s: number) => ({ interval: [-2 + s, 2] as const })],
+    ["upper end", (s: number) => ({ interval: [-2, 2 + s] as const })],
+  ])("twice the standard error of the %s stays under half a unit of the last digit", (_, part) => {
+    expect(isStable(swaying(part(0.9995 * most)), 2)).toBe(true);
+    expect(isStable(swaying(part(1.0005 * most)), 2)).toBe(false);
+    expect(isStable(swaying(part(0.9995 * most)).slice(2), 2)).toBe(false); // four blocks
+  });
+  it.each([
+    // standard deviation, half a unit of its second digit
+    [115, 5],
+    [99, 0.5],
+    [50_000, 500],
+    [0.0023, 0.00005],
+  ])("a standard deviation of %d has its last digit at twice %d", (standardDeviation, half) => {
+    const of = (s: number): boolean =>
+      isStable(
+        swaying({ mean: (s * most * half) / 0.05 }).map((own) => ({ ...own, standardDeviation })),
+        2,
+      );
+    expect(of(0.9995)).toBe(true);
+    expect(of(1.0005)).toBe(false);
+  });
+  it("takes blocks of 100 trials outside the interval where coverage is high", () => {
+    const exact = { x: { value: 3, standardUncertainty: 0 } };
+    const options = { random: seededRandom(1), coverage: 0.999 };
+    expect(monteCarlo(({ x }) => x, exact, options).trials).toBe(500_000);
+  });
+});
+
 describe("properties", () => {
+  it("keeps shares and slopes however small the uncertainties", () => {
+    const tiny = { value: 1e-9, standardUncertainty: 1e-10 };
+    const { budget } = monteCarlo(({ x }) => 2 * x, { x: tiny }, { random: seededRandom(20) });
+    expectRelative(budget[0]!.sensitivity, 2, 1e-12);
+    expectRelative(budget[0]!.share, 1, 0.03); // 10 000 trials: 0.7 % of the standard deviation, four of those
+  });
   it("agrees with first-order propagation within 2 % where the model is nearly straight", () => {
     const inputs = {
       signal: { value: 1.2, standardUncertainty: 0.002 },
@@ -190,6 +274,12 @@ describe("edges", () => {
     expectRefusal(() => monteCarlo(f, inputs, undefined as never), TypeError, "options");
     expectRefusal(() => monteCarlo(f, inputs, { random, coverage: 95 }), RangeError, "percent");
     expectRefusal(() => monteCarlo(f, inputs, { random, digits: 9 }), RangeError, "digits");
+    expectRefusal(
+      () => monteCarlo(f, inputs, { random, digits: 1.5 }),
+      RangeError,
+      "digits",
+      "whole",
+    );
     expectRefusal(
       () => monteCarlo(f, { x: { ...inputs.x, distribution: "flat" as never } }, { random }),
       TypeError,

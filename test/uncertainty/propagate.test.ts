@@ -113,6 +113,11 @@ describe("independent fixtures", () => {
     expect(budget[2]!.contribution).toBe(0);
   });
 
+  it("is exact for a cubic, with steps as wide as its uncertainty allows", () => {
+    const { budget } = propagate(({ x }) => x * x * x, { x: { value: 2, standardUncertainty: 5 } });
+    expectRelative(budget[0]!.sensitivity, 12, 1e-13);
+  });
+
   it("takes the caller's derivative where one is given", () => {
     const { budget } = propagate(
       ({ x, y }) => Math.abs(x) + y,
@@ -159,6 +164,35 @@ describe("properties", () => {
   });
 });
 
+describe("small numbers", () => {
+  const tiny = { value: 1e-9, standardUncertainty: 1e-10, degreesOfFreedom: 4 };
+  it("keep their shares and degrees of freedom", () => {
+    const { budget, degreesOfFreedom } = propagate(({ x }) => 3 * x, { x: tiny });
+    expectRelative(budget[0]!.share, 1, 1e-12);
+    expectRelative(degreesOfFreedom, 4, 1e-12);
+  });
+  it("keep their correlation, which never passes 1", () => {
+    fc.assert(
+      fc.property(between(-3, 3), between(-3, 3), between(-3, 3), (a, b, c) => {
+        fc.pre(Math.abs(a) + Math.abs(b) + Math.abs(c) > 0.1);
+        const inputs = { x: tiny, y: tiny, z: tiny };
+        const sum = propagate(({ x, y, z }) => a * x + b * y + c * z, inputs);
+        const same = propagatedCorrelation(sum, sum);
+        expectAbsolute(same, 1, 1e-12);
+        expect(same).toBeLessThanOrEqual(1);
+        const opposite = propagate(({ x, y, z }) => -a * x - b * y - c * z, inputs);
+        expect(propagatedCorrelation(sum, opposite)).toBeGreaterThanOrEqual(-1);
+      }),
+    );
+  });
+  it("exact inputs have no share and no correlation", () => {
+    const exact = propagate(({ x }) => x, { x: { value: 2, standardUncertainty: 0 } });
+    expect(exact.standardUncertainty).toBe(0);
+    expect(exact.budget[0]!.share).toBe(0);
+    expect(propagatedCorrelation(exact, exact)).toBe(0);
+  });
+});
+
 describe("edges", () => {
   const one = { x: { value: 1, standardUncertainty: 0.1 } };
   it("has no degrees of freedom to give where finite ones are correlated", () => {
@@ -170,6 +204,18 @@ describe("edges", () => {
         { correlations: [{ between: ["x", "y"], coefficient }] },
       ).degreesOfFreedom;
     expect(sum(0.5)).toBeNaN();
+    for (const [x, y] of [
+      [one.x, finite],
+      [finite, one.x],
+    ] as const) {
+      const between = ["y", "x"] as const;
+      const mixed = propagate(
+        (v) => v.x + v.y,
+        { x, y },
+        { correlations: [{ between, coefficient: 0.5 }] },
+      );
+      expect(mixed.degreesOfFreedom).toBeNaN();
+    }
     expectRelative(sum(0), 8, 1e-6);
     expect(propagate(({ x }) => x, one).degreesOfFreedom).toBe(Number.POSITIVE_INFINITY);
   });

@@ -4,10 +4,10 @@ import { normalQuantile } from "../../src/_normalQuantile.js";
 import { expectAbsolute, expectRefusal, expectRelative } from "../_tolerance.js";
 
 describe("seededRandom", () => {
-  it("is xoshiro128** seeded by SplitMix32, written out in big integers", () => {
+  it.each([20261201, 6])("is xoshiro128** seeded by SplitMix32, in big integers: %d", (seed) => {
     const mask = 0xffffffffn;
     const rotate = (x: bigint, by: bigint): bigint => ((x << by) | (x >> (32n - by))) & mask;
-    let counter = 20261201n;
+    let counter = BigInt(seed);
     const fill = (): bigint => {
       counter = (counter + 0x9e3779b9n) & mask;
       let z = ((counter ^ (counter >> 16n)) * 0x85ebca6bn) & mask;
@@ -26,7 +26,7 @@ describe("seededRandom", () => {
       s[3] = rotate(s[3], 11n);
       return result;
     };
-    const random = seededRandom(20261201);
+    const random = seededRandom(seed);
     for (let i = 0; i < 1000; i++) {
       const expected = Number(((next() >> 5n) << 26n) | (next() >> 6n)) / 2 ** 53;
       expect(random()).toBe(expected);
