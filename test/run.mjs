@@ -49,7 +49,10 @@ const STEPS = [
     command: ["tsc", "--noEmit", "-p", ".config/tsconfig.site.json"],
     needs: ["build"],
   },
-  vitest("unit", "vitest.config.ts"),
+  vitest(
+    ...["unit", "vitest.config.ts", "--coverage", "--coverage.reporter=json-summary"],
+    `--coverage.reportsDirectory=${RESULTS}coverage`,
+  ),
   { name: "docs", command: ["tsx", "docs/site/build.ts"], needs: ["build"] },
   { ...vitest("examples", "vitest.package.config.ts", "test/examples"), needs: ["build"] },
   { ...vitest("package", "vitest.package.config.ts", "test/package"), needs: ["build", "docs"] },
@@ -102,6 +105,15 @@ function count(step, code) {
   return { passed, failed: silent ? 1 : failed, skipped };
 }
 
+/** Shares of statements, branches and functions that a step's tests ran, if it counted them. */
+function coverage() {
+  const path = `${RESULTS}coverage/coverage-summary.json`;
+  if (!existsSync(path)) return "";
+  const { statements, branches, functions } = JSON.parse(readFileSync(path, "utf8")).total;
+  rmSync(path);
+  return `; ran ${statements.pct} % of statements, ${branches.pct} % of branches, ${functions.pct} % of functions`;
+}
+
 const args = process.argv.slice(2);
 const all = args.includes("--all");
 const wanted = args.filter((arg) => arg !== "--all");
@@ -139,7 +151,7 @@ for (const step of STEPS) {
   total.passed += passed;
   total.failed += failed;
   const detail = step.report
-    ? ` ${passed} passed, ${failed} failed${skipped ? `, ${skipped} skipped` : ""}`
+    ? ` ${passed} passed, ${failed} failed${skipped ? `, ${skipped} skipped` : ""}${coverage()}`
     : "";
   console.log(`${name}${seconds} s ${failed === 0 ? "ok" : "FAILED"}${detail}`);
   if (failed > 0) {

@@ -146,6 +146,8 @@ describe("edges", () => {
     expectRefusal(() => quantity(550, 2001), RangeError, "co2Ppm", "0 to 2000 ppm", "2001");
     expectRefusal(() => quantity(550, Number.NaN), RangeError, "co2Ppm");
     expectRefusal(() => quantity("550" as never, 400), TypeError, name);
+    expectRefusal(() => quantity(550, -1), RangeError, "co2Ppm", "-1");
+    expectRefusal(() => quantity(550, "400" as never), TypeError, "co2Ppm", '"400"');
     expectRefusal(() => quantity(550, undefined as never), TypeError, "co2Ppm");
   });
   it("rayleighScatteringCoefficient", () => {
@@ -154,6 +156,11 @@ describe("edges", () => {
       RangeError,
       "230 to 1690 nm",
       "µm",
+    );
+    expectRefusal(
+      () => rayleighScatteringCoefficient(500, undefined as never),
+      TypeError,
+      "moistAir",
     );
     expectRefusal(() => rayleighScatteringCoefficient(500, {} as never), TypeError, "moistAir");
   });
