@@ -1,6 +1,7 @@
 /** Layers put together by their reflection and transmission at the nodes (the adding method). */
 import { inverse, product } from "./_matrix.js";
 import type { LayerModes } from "./_layerModes.js";
+import { responses } from "./_responses.js";
 
 /** A layer between what lies above and below it. All matrices act on the scaled fields at the nodes, row by row. */
 export interface Join {
@@ -46,49 +47,4 @@ function pileReflection(
   const through = product(bounces, transmission, size);
   const back = product(product(transmission, below, size), through, size);
   return reflection.map((own, i) => own + back[i]!);
-}
-
-/** A layer's reflection and transmission: the sum and difference of its answers to even and odd illumination. */
-function responses(
-  layer: LayerModes,
-  secants: Float64Array,
-): { reflection: Float64Array; transmission: Float64Array } {
-  const size = secants.length;
-  const even = answer(layer.evenFactor, layer.vectors, secants);
-  const odd = answer(layer.oddFactor, layer.vectors, secants);
-  const reflection = new Float64Array(size * size);
-  const transmission = new Float64Array(size * size);
-  for (let i = 0; i < size * size; i++) {
-    reflection[i] = even[i]! + odd[i]!;
-    transmission[i] = even[i]! - odd[i]!;
-  }
-  for (let i = 0; i < size; i++) reflection[i * size + i]! -= 1;
-  return { reflection, transmission };
-}
-
-/** Secants times Z (factor factorᵀ)⁻¹ Zᵀ, Z the eigenvectors as columns. */
-function answer(factor: Float64Array, vectors: Float64Array, secants: Float64Array): Float64Array {
-  const size = secants.length;
-  const half = vectors.slice(); // factor⁻¹ Zᵀ
-  for (let m = 0; m < size; m++) {
-    for (let k = 0; k < m; k++) {
-      const part = factor[m * size + k]!;
-      for (let j = 0; j < size; j++) half[m * size + j]! -= part * half[k * size + j]!;
-    }
-    const scale = factor[m * size + m]!;
-    for (let j = 0; j < size; j++) half[m * size + j]! *= scale;
-  }
-  const whole = new Float64Array(size * size);
-  for (let i = 0; i < size; i++) {
-    for (let m = 0; m < size; m++) {
-      const part = half[m * size + i]!;
-      for (let j = 0; j <= i; j++) whole[i * size + j]! += part * half[m * size + j]!;
-    }
-    for (let j = 0; j < i; j++) {
-      whole[j * size + i] = whole[i * size + j]! * secants[j]!;
-      whole[i * size + j]! *= secants[i]!;
-    }
-    whole[i * size + i]! *= secants[i]!;
-  }
-  return whole;
 }

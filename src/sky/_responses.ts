@@ -1,0 +1,47 @@
+/** How a layer answers light at its faces, from its eigenmodes. */
+import type { LayerModes } from "./_layerModes.js";
+
+/** A layer's reflection and transmission: the sum and difference of its answers to even and odd illumination. */
+export function responses(
+  layer: LayerModes,
+  secants: Float64Array,
+): { reflection: Float64Array; transmission: Float64Array } {
+  const size = secants.length;
+  const even = answer(layer.evenFactor, layer.vectors, secants);
+  const odd = answer(layer.oddFactor, layer.vectors, secants);
+  const reflection = new Float64Array(size * size);
+  const transmission = new Float64Array(size * size);
+  for (let i = 0; i < size * size; i++) {
+    reflection[i] = even[i]! + odd[i]!;
+    transmission[i] = even[i]! - odd[i]!;
+  }
+  for (let i = 0; i < size; i++) reflection[i * size + i]! -= 1;
+  return { reflection, transmission };
+}
+
+/** Secants times Z (factor factorᵀ)⁻¹ Zᵀ, Z the eigenvectors as columns. */
+function answer(factor: Float64Array, vectors: Float64Array, secants: Float64Array): Float64Array {
+  const size = secants.length;
+  const half = vectors.slice(); // factor⁻¹ Zᵀ
+  for (let m = 0; m < size; m++) {
+    for (let k = 0; k < m; k++) {
+      const part = factor[m * size + k]!;
+      for (let j = 0; j < size; j++) half[m * size + j]! -= part * half[k * size + j]!;
+    }
+    const scale = factor[m * size + m]!;
+    for (let j = 0; j < size; j++) half[m * size + j]! *= scale;
+  }
+  const whole = new Float64Array(size * size);
+  for (let i = 0; i < size; i++) {
+    for (let m = 0; m < size; m++) {
+      const part = half[m * size + i]!;
+      for (let j = 0; j <= i; j++) whole[i * size + j]! += part * half[m * size + j]!;
+    }
+    for (let j = 0; j < i; j++) {
+      whole[j * size + i] = whole[i * size + j]! * secants[j]!;
+      whole[i * size + j]! *= secants[i]!;
+    }
+    whole[i * size + i]! *= secants[i]!;
+  }
+  return whole;
+}
