@@ -33,7 +33,7 @@ export interface TwilightDirection {
  * Source: as `prepareTwilight`.
  *
  * @param twilight - prepared air from `prepareTwilight`
- * @param direction - `sunZenithDeg` 0 to 96 degrees; `viewZenithDeg` 0 to 90 degrees; `relativeAzimuthDeg`, any
+ * @param direction - `sunZenithDeg` 0 to 96 degrees; `viewZenithDeg` 0 to 90 degrees; `relativeAzimuthDeg`, -3600 to 3600
  * @returns `[I, Q, U]` for a sunbeam of flux π through a unit area square to it, signs as `skyStokes`
  * @throws TypeError if an argument is of the wrong kind; RangeError if an angle is out of range
  * @example
