@@ -22,7 +22,7 @@ export const STANDARD_ATMOSPHERE = 101325;
 export const ASTRONOMICAL_UNIT = 149597870700;
 /** Nominal total solar irradiance at 1 au, W m⁻² (IAU 2015 resolution B3, from memory). */
 export const TOTAL_SOLAR_IRRADIANCE = 1361;
-/** Luminous efficacy at the peak of the 2° observer's y, lm W⁻¹ (CIE 018, from memory); 683 is its value at 540 THz, 0.5 nm away. */
+/** Luminous efficacy at the peak of the 2° observer's y, lm W⁻¹ (CIE 018, from memory); 683 is its value at 540 THz, 555.016 nm in standard air. */
 export const PEAK_LUMINOUS_EFFICACY = 683.002;
 /** Mean radius of the Earth (2a + b)/3, m (IUGG, WGS 84). */
 export const MEAN_EARTH_RADIUS = 6371008.8;

@@ -16,7 +16,7 @@ import { ozoneOf } from "./_ozone.js";
  * 0.3 % at 500-650 nm, 2.1 % at 425 and 825 nm, 1.1 % between. Differences the Dobson network uses (226.9 K): 305.5 less 325.4 nm +2.4 %,
  * 311.45 less 332.4 nm -1.7 %, 317.6 less 339.8 nm -5.9 %. The two sources agree within about 3 % where absorption is strong.
  * Structure inside the bands is lost: against the 1 nm cold table up to 2.4 % at 284-296 nm (straight lines in place of
- * logarithms 5.4 %), a factor 3 at 336-345 nm, 0.03 in optical depth for 300 DU at 324 nm. From 425 nm straight lines between the 5 nm
+ * logarithms 5.4 %), a factor 2.8 at 336-345 nm, 0.03 in optical depth for 300 DU at 324 nm. From 425 nm straight lines between the 5 nm
  * bands would have cost 26 % at 437 nm and 4.3 % at 500-650 nm, which the 1 nm table avoids.
  * Source: Burkholder et al. 2020, JPL Publication 19-5 (218, 293 K); Heays, Bosman & van Dishoeck 2017, A&A 602, A105 (cold).
  *

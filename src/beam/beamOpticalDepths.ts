@@ -26,7 +26,7 @@ export interface BeamOpticalDepths {
  * Model: vertical depth times the constituent's own air mass; water and mixed gases by their band model on the slant amount.
  * Validity: 280-1690 nm, enforced. Outside its table a constituent counts as transparent: nitrogen dioxide beyond 660 nm, ozone beyond
  * 1098 nm, water and mixed gases below 300 nm.
- * Accuracy: the product of the constituents' own functions to 1e-13.
+ * Accuracy: 1e-13 relative against each constituent's own function (water and mixed gases through their transmittances, 1e-15).
  * Source: see `beamTransmittance`.
  *
  * @param wavelengthNm - vacuum wavelength, 280 to 1690 nm

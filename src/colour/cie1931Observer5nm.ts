@@ -3,7 +3,7 @@ import type { Observer } from "./observer.js";
 
 /**
  * CIE 1931 standard observer (2°), every 5 nm from 380 to 780 nm, wavelengths in standard air: a sixth as much to sum and
- * to load as the 1 nm table; for smooth spectra. White points A, D50, D65 by the two differ by up to 1.6e-5 in x and y.
+ * to load as the 1 nm table; for smooth spectra. White points A, D50, D65 by the two differ by up to 1.5e-5 in x and y.
  * Source: CIE 15, every fifth row of the 1 nm table.
  */
 export const cie1931Observer5nm: Observer = {

@@ -8,11 +8,11 @@ import { FIRST_COMPONENT, MEAN_COMPONENT, SECOND_COMPONENT } from "./_daylightCo
  * Relative spectrum of the CIE daylight phase of a given correlated colour temperature.
  *
  * Model: S0 + M1 S1 + M2 S2 with M1 and M2 from the chromaticity of the daylight locus, rounded to 3 decimals as the CIE
- * prescribes, so that the named illuminants come out as printed. The rounding makes steps of about 3 K near 6500 K.
+ * prescribes, so that the named illuminants come out as printed. The rounding makes steps of about 2 K near 6500 K.
  * Validity: 4000-25 000 K, enforced; 300 to 830 nm every 5 nm. A measured or computed sky is not bound to follow it.
  * Accuracy: within 0.0009 of the printed D65, whose largest value is 117.8; its own colour temperature is
- * within 5e-4 of the one asked for, over the whole range (tested).
- * Source: CIE 15:2004, equations 3.3 to 3.6 (numbers from memory) and table T.2.
+ * within 5e-4 of the one asked for to 20 000 K, 1e-3 to 25 000 K (tested).
+ * Source: CIE 15:2004, equations of the daylight phase (section 3.1) and table T.2 (both numbers from memory).
  *
  * @param temperatureK - correlated colour temperature on today's scale, 4000 to 25 000 K. The named illuminants lie at
  *   their nominal temperature times 1.4388 / 1.4380: D65 at 6503.6 K

@@ -11,7 +11,7 @@ const C = -1.6364;
  * Relative air mass of clean air from the apparent zenith angle (where you see the sun).
  *
  * Model: 1 / (cos z + a (b + elevation)^c), fitted to a table integrated through the ISO standard atmosphere of 1972.
- * Validity: apparent zenith angle 0 to 90°, enforced; sea level, 700 nm; air only, not ozone (21 % off at 85°) nor aerosol.
+ * Validity: apparent zenith angle 0 to 90°, enforced; sea level, 700 nm; air only, not ozone (21 % too much at 85°) nor aerosol.
  * Accuracy: within 0.17 % to 89.5° and -0.63 % at the horizon against `refractedPath` (dry standard air, 550 nm, Earth 6371 km);
  * against the authors' own table -0.44 % at the horizon (37.92 for 38.087), +0.19 % at 1° elevation, 0.11 % from 3° up.
  * Source: Kasten & Young 1989, Appl. Opt. 28, 4735, equation 3 and table 2.

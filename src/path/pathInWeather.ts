@@ -12,8 +12,8 @@ import type { WeatherPaths } from "./prepareWeatherPaths.js";
  * temperature.
  * Validity: within the ranges given to `prepareWeatherPaths`, enforced: nothing is extrapolated.
  * Accuracy: against `refractedPath` in the same weather, for ranges of 4 kPa and 20 K at sea level: 2e-6 relative in the masses
- * and 5e-4 arcsec in refraction to 88 degrees, 5e-6 and 0.015 arcsec at 90 degrees; for 8 kPa and 40 K ten times that. Takes
- * about 0.1 ms.
+ * and 5e-4 arcsec in refraction to 88 degrees, 5e-6 and 0.015 arcsec at 90 degrees (masses at true angles twice that); for
+ * 8 kPa and 40 K ten times as much. Takes about 0.1 ms.
  * Source: as `refractedPath`; the interpolation is our own.
  *
  * @param weather - `pressurePa` and `temperatureK` at the observer

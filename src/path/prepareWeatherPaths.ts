@@ -26,7 +26,7 @@ export interface WeatherPaths<Key extends string = never> {
 }
 
 /**
- * Prepared paths for a range of pressure and temperature at the observer, so that `pathInWeather` can follow a day in microseconds.
+ * Prepared paths for a range of pressure and temperature at the observer, so that `pathInWeather` can follow a day in a fraction of a millisecond each.
  *
  * Model: `preparePath` on a grid of three pressures and three temperatures over the ranges. The profile keeps its shape: one
  * offset to all its temperatures, pressure integrated anew from the observer's, and the mole fraction of vapour as it was.

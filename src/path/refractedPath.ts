@@ -39,7 +39,8 @@ export interface RefractedPath<Key extends string = never> {
  * singularity by a change of variable; the variable here is our own); Ciddor 1996 for the index.
  *
  * @param apparentZenithDeg - zenith angle at which the observer sees the ray, degrees, 0 to the horizon
- * @param input - `profile`; `altitudeM` of the observer, m above sea level, at most 80 000; `wavelengthNm` 300 to 1690 nm,
+ * @param input - `profile`; `altitudeM` of the observer, m above sea level, from the profile's lowest height to
+ *   80 000; `wavelengthNm` 300 to 1690 nm,
  *   vacuum; `earthRadiusM` of curvature at sea level, 6 300 000 to 6 420 000 m; `constituents`, a record of layers
  * @returns `refractionDeg` and `trueZenithDeg` in degrees, `airMass` and `masses` (one per key of `constituents`) without unit
  * @throws TypeError if an argument is of the wrong kind; RangeError if it is out of range, if the ray meets the ground or is

@@ -51,6 +51,10 @@ function checkSettings(settings: ArchiveSettings, channels: number): void {
   checkUncertainty(settings.ozoneStandardUncertaintyDu, "ozoneStandardUncertaintyDu", NAME);
   checkUncertainty(settings.zenithStandardUncertaintyDeg, "zenithStandardUncertaintyDeg", NAME);
   checkNumber(settings.screeningChannel, 0, channels - 1, "", "screeningChannel", NAME);
+  if (Number.isInteger(settings.screeningChannel)) return;
+  throw new RangeError(
+    `${NAME}: screeningChannel must be a whole number, got ${settings.screeningChannel}`,
+  );
 }
 
 function checkChannel(channel: ArchiveChannel, c: number): void {

@@ -31,15 +31,15 @@ export interface SunReading {
   readonly constant: number;
   /** Its standard uncertainty, same unit. */
   readonly constantStandardUncertainty: number;
-  /** Degrees of freedom of that uncertainty; Infinity if left out. */
+  /** Degrees of freedom of that uncertainty, 1 or more; Infinity if left out. */
   readonly constantDegreesOfFreedom?: number;
-  /** Distance of the sun, au. */
+  /** Distance of the sun, 0.9 to 1.1 au. */
   readonly sunDistanceAu: AstronomicalUnits;
   /** Air mass of the aerosol, above 0, to 50. */
   readonly airMass: Dimensionless;
   /** Change of that air mass per degree of zenith angle. */
   readonly airMassPerDeg: number;
-  /** Standard uncertainty of the zenith angle, degrees; `zenithStandardUncertainty` gives it from time and position. */
+  /** Standard uncertainty of the zenith angle, 0 to 10 degrees; `zenithStandardUncertainty` gives it from time and position. */
   readonly zenithStandardUncertaintyDeg: Degrees;
   /** The known constituents. */
   readonly terms: readonly UncertainTerm[];

@@ -15,10 +15,10 @@ import { screenDays } from "./_screenDays.js";
  * Aerosol optical depths, standard uncertainties and cloud screening of many readings in several channels.
  *
  * Model: as `aerosolOpticalDepth` for each reading and channel, then `cloudScreening` on one channel day by day (a new day
- * begins after a gap of three hours). The slope of every air mass with the zenith angle is taken as m √(m² - 1) per radian, a flat
+ * begins after a gap of more than three hours). The slope of every air mass with the zenith angle is taken as m √(m² - 1) per radian, a flat
  * atmosphere's; it is used for the uncertainty alone.
  * Validity: as `aerosolOpticalDepth`. A NaN or a signal that is not above 0 gives NaN at that place, and code 1 of the
- * screening if it is in the screened channel.
+ * screening if it is in the screened channel. Single readings are not checked otherwise.
  * Accuracy: depths 1e-12 against `aerosolOpticalDepth` reading by reading, uncertainties 1e-10 with the same slopes. To air
  * mass 6 the flat slope is within 6 % of a spherical one's, 12 % for ozone's shell at 22 km, which a zenith angle known to 0.02° hardly
  * shows. Some 0.1 µs a value (measured on Node 20).
@@ -29,7 +29,7 @@ import { screenDays } from "./_screenDays.js";
  * @param settings - uncertainties common to all channels, and the screening
  * @param out - arrays to fill, of the right lengths; made if left out
  * @returns optical depths and standard uncertainties, laid out as the signals, and the screening codes
- * @throws TypeError if an argument is of the wrong kind; RangeError if lengths differ or a setting is out of range
+ * @throws TypeError if an argument is of the wrong kind; RangeError if lengths differ, times do not rise within a day or a setting is out of range
  * @example
  * import { aerosolOpticalDepths } from "airlight";
  * const readings = {

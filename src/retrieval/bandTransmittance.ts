@@ -14,7 +14,8 @@ const NAME = "bandTransmittance";
  * Model: ∫ S P exp(-slant depth) dλ / ∫ S P dλ by Simpson's rule between the wavelengths of passband and source. It is
  * no exponential of the air mass: the light that is left grows redder in a blue channel (Forbes effect).
  * Validity: the source must cover the passband; passbands count energy or photons as the caller's curve does.
- * Accuracy: 3e-6 relative on a Gaussian band against the integral in closed form; it is the sampling of the curves that counts.
+ * Accuracy: 3e-6 relative against the integral in closed form on a Gaussian band 20 nm wide (depth changing by 0.01 per nm), 5e-6
+ * with a source that slopes by 2 % per nm; it is the sampling of the curves that counts.
  * Source: definition of a band mean.
  *
  * @param passband - relative response of the channel

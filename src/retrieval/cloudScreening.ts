@@ -17,7 +17,7 @@ const LEAST_STABLE = 0.015;
  * what is left is below 0.015, readings beyond three standard deviations of its mean are out.
  * Validity: readings every few seconds to every few minutes. Variation is all it knows: thin even cirrus passes, and the edge
  * of a smoke plume is taken for cloud.
- * Accuracy: on 40 simulated days with cloud passing through a third of the time it keeps at least 90 % of the clear readings
+ * Accuracy: on 40 simulated days with cloud passing through over a quarter of the time it keeps at least 90 % of the clear readings
  * and leaves at most 2 % of those with a cloud depth above 0.02.
  * Source: after Smirnov et al. 2000, Remote Sens. Environ. 73, 337 (triplets, 0.02 or 3 %, 0.015, three standard deviations;
  * from memory), applied to successive single readings; the neighbour rule is our own.

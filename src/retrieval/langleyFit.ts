@@ -51,7 +51,7 @@ export interface LangleyResult {
  * negative are left out first. The errors come from the scatter of the kept readings alone: an optical depth that drifts with
  * air mass is not seen by them. A morning without any line comes out with a large error.
  * Validity: at least 8 readings kept, more than half of the positive ones, over an air-mass range of at least 1; else it throws.
- * Accuracy: with noise of 0.1 % and 120 readings over air masses 1.5 to 8, 30 % of them behind cloud in the middle, the
+ * Accuracy: with noise of 0.1 % and 120 readings over air masses 1.6 to 8, 30 % of them behind cloud in the middle, the
  * constant is within 0.12 % in each of 200 simulated mornings and the standard errors are right to 15 %.
  * Source: Shaw, Reagan & Herman 1973, J. Appl. Meteorol. 12, 374; Siegel 1982, Biometrika 69, 242 (repeated median);
  * Rousseeuw & Leroy 1987, Robust Regression and Outlier Detection, chapter 5 (scale); all from memory.

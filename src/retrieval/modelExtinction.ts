@@ -43,7 +43,7 @@ export interface PredictedExtinction {
  *
  * Model: the extinction of each star at each air mass from its own band mean, then a least-squares plane: constant, air mass,
  * colour times air mass, colour. Subtract it from the fitted extinction, and what is left is what the model does not
- * have: aerosol. All constituents share one air mass here, good to 1 % of ozone's part at air mass 3.
+ * have: aerosol. All constituents share one air mass here, 2 % too much of ozone's part at air mass 3.
  * Validity: smooth passbands, colours and air masses like those of the night.
  * Accuracy: 1e-6 magnitudes on a grey air, where there is no second order; 2e-4 on blue and visual bands against a brute-force sum.
  * Source: definition of a band mean; extinction coefficients as in Hardie 1962 (from memory).

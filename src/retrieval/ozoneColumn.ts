@@ -16,7 +16,7 @@ import { dot } from "./_smallMatrices.js";
 
 /** One channel's reading. */
 export interface OzoneChannel {
-  /** Wavelength, nm. */
+  /** Wavelength, 200 to 4000 nm. */
   readonly wavelengthNm: Nanometres;
   /** Reading, above 0. */
   readonly signal: number;
@@ -34,15 +34,15 @@ export interface OzoneChannel {
 
 /** The way through the air, and what is taken for the aerosol. */
 export interface OzonePath {
-  /** Distance of the sun, au. */
+  /** Distance of the sun, 0.9 to 1.1 au. */
   readonly sunDistanceAu: AstronomicalUnits;
-  /** Air mass of ozone. */
+  /** Air mass of ozone, above 0, to 50. */
   readonly ozoneAirMass: Dimensionless;
   /** Its relative standard uncertainty (height of the layer). */
   readonly ozoneAirMassRelativeUncertainty: Dimensionless;
-  /** Air mass of the aerosol. */
+  /** Air mass of the aerosol, above 0, to 50. */
   readonly aerosolAirMass: Dimensionless;
-  /** Powers of wavelength whose sum is the aerosol's depth: [0] for an ultraviolet pair, [0, -1, -2] for six visible channels. */
+  /** Powers of wavelength, -6 to 6, whose sum is the aerosol's depth: [0] for an ultraviolet pair, [0, -1, -2] for six visible channels. */
   readonly aerosolPowers: readonly number[];
   /** Relative standard uncertainty of all known slant depths together (pressure). */
   readonly knownRelativeUncertainty: Dimensionless;
@@ -65,9 +65,9 @@ export interface OzoneColumn extends Budget {
  * wavelength, solved by least squares with the errors of signals and constants as weights; with as many unknowns as channels
  * it is the classic pair.
  * Validity: an ultraviolet pair (305 to 325 nm) with an aerosol of equal depth in both, or visible channels across
- * the Chappuis band. The visible fit is weak: with calibrations of 0.4 % it carries 13 to 30 DU at air mass 2 to 3 if one channel
- * is near 610 nm, and 35 to 110 DU if none lies between 500 and 675 nm. Cross-sections at the centre of the band instead of
- * means over it bias an ultraviolet pair of 2 nm width by some 5 to 12 DU. Ultraviolet light harms eyes and skin: mind the
+ * the Chappuis band. The visible fit is weak: with calibrations of 0.4 % it carries 18 to 32 DU at air mass 2 if one channel
+ * is near 610 nm; if none lies between 500 and 675 nm, 53 to 63 DU with two powers, 85 and more with three; less as one over the
+ * air mass. Cross-sections at the centre of the band instead of means over it bias an ultraviolet pair of 2 nm width by some 5 to 13 DU. Ultraviolet light harms eyes and skin: mind the
  * usual cautions.
  * Accuracy: exact to 1e-8 DU on noise-free readings of the same model; 1 DU on a simulated ultraviolet pair of 2 nm width with
  * averaged cross-sections; the stated uncertainty matches the spread of 400 simulated pairs and fits within 10 %.

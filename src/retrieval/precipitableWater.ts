@@ -16,7 +16,7 @@ export interface WaterReading {
   readonly constant: number;
   /** Its standard uncertainty, same unit. */
   readonly constantStandardUncertainty: number;
-  /** Distance of the sun, au. */
+  /** Distance of the sun, 0.9 to 1.1 au. */
   readonly sunDistanceAu: AstronomicalUnits;
   /** Air mass of water vapour, above 0, to 50. */
   readonly airMass: Dimensionless;
@@ -24,11 +24,11 @@ export interface WaterReading {
   readonly knownSlantDepth: Dimensionless;
   /** Its standard uncertainty. */
   readonly knownSlantStandardUncertainty: Dimensionless;
-  /** Factor a of the band, for slant water in cm. */
+  /** Factor a of the band, above 0, for slant water in cm. */
   readonly bandFactor: number;
   /** Its standard uncertainty. */
   readonly bandFactorStandardUncertainty: number;
-  /** Exponent b of the band. */
+  /** Exponent b of the band, 0.1 to 1.5. */
   readonly bandExponent: number;
   /** Its standard uncertainty. */
   readonly bandExponentStandardUncertainty: number;

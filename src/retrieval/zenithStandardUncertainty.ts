@@ -13,11 +13,11 @@ export interface SightUncertainty {
   readonly latitudeDeg: Degrees;
   /** Azimuth of the sun from north through east, 0 to 360°. */
   readonly sunAzimuthDeg: Degrees;
-  /** Standard uncertainty of the time, s. */
+  /** Standard uncertainty of the time, 0 to 86 400 s. */
   readonly timeStandardUncertaintyS: number;
-  /** Standard uncertainty of the latitude, degrees. */
+  /** Standard uncertainty of the latitude, 0 to 10 degrees. */
   readonly latitudeStandardUncertaintyDeg: Degrees;
-  /** Standard uncertainty of the longitude, degrees. */
+  /** Standard uncertainty of the longitude, 0 to 10 degrees. */
   readonly longitudeStandardUncertaintyDeg: Degrees;
 }
 

@@ -8,7 +8,7 @@ import type { Stokes } from "./skyStokes.js";
  *
  * Model: the ratio itself.
  * Validity: I above 0.
- * Accuracy: 3e-16 relative.
+ * Accuracy: 1e-15 relative.
  * Source: Stokes 1852; Hansen & Travis 1974, Space Sci. Rev. 16, 527, section 1.
  *
  * @param stokes - `[I, Q, U]` as of `skyStokes`, any unit

@@ -49,7 +49,7 @@ export type Stokes = [number, number, number];
  * Source: Chandrasekhar 1950, Radiative Transfer, chapter X; Natraj, Li & Yung 2009, Astrophys. J. 691, 1909 (tables).
  *
  * @param lit - a lit sky from `illuminateSky`
- * @param direction - `viewZenithDeg` 0 to under 90 degrees; `relativeAzimuthDeg`, any; `at` "ground" or "top"
+ * @param direction - `viewZenithDeg` 0 to under 90 degrees; `relativeAzimuthDeg`, -3600 to 3600; `at` "ground" or "top"
  * @returns `[I, Q, U]` for a sunbeam of flux π through a unit area square to it (times irradiance / π for a radiance)
  * @throws TypeError if an argument is of the wrong kind; RangeError if an angle is out of range
  * @example

@@ -28,12 +28,12 @@ export interface TwilightDirection {
  * Validity: suns 0 to 96° from the vertical, sights down to the horizon. Straight rays: within a degree of the horizon
  * the sun's refraction (half a degree) matters more than anything stated here; pass the true, not the apparent, zenith
  * angle of the sun.
- * Accuracy: single scattering 1e-4 to 96° against a brute-force sum. All orders: within 2 % of I to 92°, 5 % to 96°
- * against a seeded Monte Carlo of field vectors in shells.
+ * Accuracy: single scattering 1e-4 to 96° against a brute-force sum. All orders: within 0.5 % of I to 93°, 1.3 % to 96°
+ * against a seeded Monte Carlo of field vectors in shells (9 directions at 450 nm; standard errors 0.1 to 0.8 %).
  * Source: as `prepareTwilight`.
  *
  * @param twilight - prepared air from `prepareTwilight`
- * @param direction - `sunZenithDeg` 0 to 96 degrees; `viewZenithDeg` 0 to 90 degrees; `relativeAzimuthDeg`, any
+ * @param direction - `sunZenithDeg` 0 to 96 degrees; `viewZenithDeg` 0 to 90 degrees; `relativeAzimuthDeg`, -3600 to 3600
  * @returns `[I, Q, U]` for a sunbeam of flux π through a unit area square to it, signs as `skyStokes`
  * @throws TypeError if an argument is of the wrong kind; RangeError if an angle is out of range
  * @example

@@ -16,7 +16,7 @@ const STEPS_PER_WIDTH = 50;
  * Model: exp(-4 ln 2 ((λ - centre) / width)²), sampled 50 times per full width at half maximum, cut 2.5 widths from the centre.
  * Validity: any centre and width whose ends stay above 0 nm. Real filters have squarer tops and longer feet; where a
  * maker prints the curve, use that.
- * Accuracy: mean within 1e-11 nm of the centre; variance 4e-4 relative above that of the true bell, which is what the
+ * Accuracy: mean within 1e-11 nm of the centre (to 2000 nm); variance 4e-4 relative above that of the true bell, which is what the
  * straight lines between the samples add (tested).
  * Source: definition of the Gaussian function.
  *

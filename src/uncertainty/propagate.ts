@@ -39,8 +39,8 @@ export interface Propagation extends Budget {
  * Validity: models nearly straight over two or three standard uncertainties of each input, and defined a tenth of one to
  * both sides. The buoyancy example of Supplement 1 (9.3) is not such a model: 0.0539 mg here, 0.0755 mg in truth, which
  * `monteCarlo` finds.
- * Accuracy: sensitivities 1e-8 relative against exact derivatives of smooth models; GUM H.1 and H.2 to the printed digits,
- * but for one that is cut there instead of rounded (0.295 for 0.2956).
+ * Accuracy: sensitivities 1e-8 relative against exact derivatives of smooth models, for uncertainties of 1e-6 to a tenth of the
+ * value; GUM H.1 and H.2 to the printed digits, but for two that are cut there instead of rounded (16.6 for 16.68, 0.295 for 0.2956).
  * Source: GUM 2008 (JCGM 100), equations 13 and 16, 5.2; effective degrees of freedom, equation G.2b.
  *
  * @param model - pure function of a record of named numbers

@@ -9,7 +9,7 @@ import type { Propagation } from "./propagate.js";
  * Model: covariance = sum over all pairs of inputs of the first's sensitivity times their covariance times the second's.
  * Validity: both from `propagate` with the same inputs and correlations, enforced by name; first order, as `propagate`.
  * Accuracy: GUM H.2 to its printed digits.
- * Source: GUM 2008 (JCGM 100), H.2.3, equation H.9.
+ * Source: GUM 2008 (JCGM 100), H.2.3, equation H.9 (equation number from memory).
  *
  * @param first - result of `propagate`
  * @param second - another result of `propagate` from the same inputs

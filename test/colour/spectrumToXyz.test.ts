@@ -51,6 +51,14 @@ describe("published values", () => {
     expectAbsolute(point[0], x, 7e-6); // printed to 1e-5: half of the last digit, and the illuminant's own rounding
     expectAbsolute(point[1], y, 7e-6);
   });
+  it("the two tables of the 1931 observer lie within 1.5e-5 of each other", () => {
+    for (const name of ["A", "D50", "D65"]) {
+      const [fine, coarse] = [cie1931Observer, cie1931Observer5nm].map((o) =>
+        xy(illuminant(name), o),
+      );
+      for (const i of [0, 1]) expectAbsolute(coarse![i]!, fine![i]!, 1.5e-5);
+    }
+  });
   it("D65 of the 1964 observer", () => {
     const point = xy(illuminant("D65"), cie1964Observer);
     expectAbsolute(point[0], 0.31382, 1e-5); // CIE 15 (from memory), printed to 1e-5 by the 5 nm sum
@@ -330,7 +338,7 @@ describe("daylightIlluminant", () => {
     );
   });
   it("is the published formula with M1 and M2 of three decimals, at 2600 temperatures", () => {
-    // CIE 15:2004, equations 3.1 to 3.4, in powers of T as printed there
+    // CIE 15:2004, section 3.1 (from memory), in powers of T as printed there
     const near7000 = Array.from({ length: 500 }, (_, i) => 6995 + 0.02 * i);
     for (const T of [...wavelengthGrid(4000, 25_000, 10), ...near7000]) {
       const x =
@@ -366,6 +374,17 @@ describe("daylightIlluminant", () => {
       expectAbsolute(found.duv, 0.003, 5e-4); // daylight lies some 0.003 above the black bodies (common practice)
     },
   );
+  it("keeps it within 5e-4 to 20 000 K and 1e-3 to 25 000 K, in steps of about 2 K near 6500 K", () => {
+    const own = (T: number): number =>
+      correlatedColourTemperature(spectrumToXyz(daylightIlluminant(T), cie1931Observer))
+        .temperatureK;
+    for (let T = 4000; T <= 25_000; T *= 1.005) {
+      expectRelative(own(T), T, T <= 20_000 ? 5e-4 : 1e-3);
+    }
+    const near = Array.from({ length: 501 }, (_, i) => own(6490 + 0.04 * i));
+    const steps = near.slice(1).map((t, i) => t - near[i]!);
+    expectAbsolute(Math.max(...steps), 2.1, 0.3); // one step of M1 or M2, or both at once
+  });
   it.each([
     [5000, 0.34567, 0.35851],
     [5500, 0.33243, 0.34744],
@@ -400,6 +419,15 @@ describe("chromaticity", () => {
         const point = chromaticity([x, y, z]);
         expectRelative(point[0] * (x + y + z) + 1, x + 1, 1e-15);
         expectRelative(point[1] * (x + y + z) + 1, y + 1, 1e-15);
+      }),
+    );
+  });
+  it("is 1e-15 off the ratios taken one by one (properties)", () => {
+    fc.assert(
+      fc.property(between(1e-3, 2), between(1e-3, 2), between(0, 2), (x, y, z) => {
+        const point = chromaticity([x, y, z]);
+        expectAbsolute(point[0], 1 / (1 + y / x + z / x), 1e-15);
+        expectAbsolute(point[1], 1 / (1 + x / y + z / y), 1e-15);
       }),
     );
   });

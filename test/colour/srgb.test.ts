@@ -132,6 +132,11 @@ describe("properties", () => {
       }),
     );
     fc.assert(
+      fc.property(triple(-0.0031, 0.0031), (dark) => {
+        near(decodeSrgb(encodeSrgb(dark)), dark, 1e-14);
+      }),
+    );
+    fc.assert(
       fc.property(triple(0.0032, 4), (bright) => {
         near(decodeSrgb(encodeSrgb(bright)), bright, 1e-14);
         near(

@@ -212,7 +212,7 @@ export const PUBLIC_NAMES: Readonly<Record<string, PublicNames>> = {
   "./retrieval": {
     values: {
       aerosolOpticalDepth: 11220,
-      aerosolOpticalDepths: 6000,
+      aerosolOpticalDepths: 6150,
       airMassPerDegree: 1230,
       angstromCurvature: 9260,
       angstromFit: 7470,

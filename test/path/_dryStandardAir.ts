@@ -18,6 +18,25 @@ export function dryStandard(heightM: number): [number, number] {
   return [t, p];
 }
 
+/** Tops of the layers of the standard atmosphere and of the air, geometric m. */
+export const LAYER_TOPS_M: readonly number[] = [
+  ...BASES.slice(1, 7).map((h) => (6356766 * h) / (6356766 - h)),
+  86000,
+];
+
+/** Temperature K and pressure Pa by the formulas of one layer, also outside it: no kink anywhere. */
+export function dryLayer(layer: number, heightM: number): [number, number] {
+  const geopotential = (6356766 * heightM) / (6356766 + heightM);
+  let [t, p] = [288.15, 101325];
+  for (let i = 0; i <= layer; i++) {
+    const climb = (i === layer ? geopotential : BASES[i + 1]!) - BASES[i]!;
+    const above = t + LAPSES[i]! * climb;
+    p *= LAPSES[i] === 0 ? Math.exp((-GMR * climb) / t) : (t / above) ** (GMR / LAPSES[i]!);
+    t = above;
+  }
+  return [t, p];
+}
+
 function compressibility(p: number, t: number, x: number): number {
   const c = t - 273.15;
   const first =
@@ -56,5 +75,5 @@ export const dryStandardAir: TestAir = {
     (heightM) => Math.exp(-(((heightM - 22000) / 5000) ** 2) / 2),
     (heightM) => Math.exp(-heightM / 2000),
   ],
-  breaksM: [...BASES.slice(1, 7).map((h) => (6356766 * h) / (6356766 - h)), 86000],
+  breaksM: LAYER_TOPS_M,
 };

@@ -118,6 +118,13 @@ describe("independent fixtures", () => {
       );
     }
   });
+  it("the two refractions agree within 0.07′ down to the horizon", () => {
+    for (let z = 0; z <= 90.5; z += 0.1) {
+      const lift = refractionSaemundsson(z, weather);
+      if (z - lift < 0 || z - lift > 90) continue;
+      expectAbsolute(lift * 60, refractionBennett(z - lift, weather) * 60, 0.07);
+    }
+  });
   it("a true angle in an apparent-angle formula is 2.6 % off at 85° and 19 % at 90° (sizes from the plan)", () => {
     expectAbsolute(airMassKastenYoung(85) / airMassYoung(85) - 1, 0.026, 2e-3);
     expectAbsolute(airMassKastenYoung(90) / airMassYoung(90) - 1, 0.19, 6e-3);

@@ -240,6 +240,39 @@ describe("weather through the day", () => {
     }
   });
 
+  const wide = prepareWeatherPaths({
+    ...sea,
+    profile,
+    pressureRangePa: [97_000, 105_000],
+    temperatureRangeK: [265, 305],
+  });
+  it.each([
+    [98_000, 302],
+    [99_000, 300],
+    [102_000, 280],
+    [104_000, 290],
+    [105_000, 305],
+  ])(
+    "%d Pa and %d K out of ranges twice as wide: ten times the error at most",
+    (pressurePa, temperatureK) => {
+      const input = exact(pressurePa, temperatureK);
+      const now = pathInWeather({ pressurePa, temperatureK }, wide);
+      for (const [zenith, mass, seconds] of [
+        [20, 2e-5, 5e-3],
+        [60, 2e-5, 5e-3],
+        [85, 2e-5, 5e-3],
+        [88, 2e-5, 5e-3],
+        [90, 5e-5, 0.15],
+      ] as const) {
+        const ray = refractedPath(zenith, input);
+        expectRelative(airMassOnPath(zenith, now), ray.airMass, mass);
+        expectRelative(constituentMassOnPath(zenith, now, "ozone"), ray.masses.ozone, mass);
+        expectRelative(constituentMassOnPath(zenith, now, "water"), ray.masses.water, mass);
+        expectAbsolute(refractionOnPath(zenith, now) * 3600, ray.refractionDeg * 3600, seconds);
+      }
+    },
+  );
+
   it("what the weather of a day is worth, and what is left of it", () => {
     const input = exact(99_300, 294);
     const ray = refractedPath(85, input);

@@ -261,6 +261,10 @@ describe("edges", () => {
     expectRefusal(call({ ozoneDu: new Float64Array(3) }), RangeError, "readings.ozoneDu");
     expectRefusal(call({ ozoneDu: undefined }), TypeError, "readings.ozoneDu");
     expectRefusal(call({}, { screeningChannel: 6 }), RangeError, "screeningChannel");
+    expectRefusal(call({}, { screeningChannel: 0.5 }), RangeError, "screeningChannel", "whole");
+    const late = readings.timesMinutes.slice();
+    late[3] = late[2]!;
+    expectRefusal(call({ timesMinutes: late }), RangeError, "timesMinutes[3]");
     expectRefusal(call({}, { windowMinutes: 0 }), RangeError, "windowMinutes");
     expectRefusal(
       call({}, { pressureRelativeUncertainty: -1 }),

@@ -246,6 +246,17 @@ describe("independent fixtures", () => {
 });
 
 describe("properties", () => {
+  it("reduces signals to rounding at any slant depth", () => {
+    fc.assert(
+      fc.property(between(0, 1), between(0.1, 20), between(0.9, 1.1), (depth, mass, au) => {
+        const terms = [{ opticalDepth: depth, airMasses: [mass] }];
+        const [reduced] = reducedSignals([1], { sunDistanceAu: au, terms });
+        const slant = depth * mass;
+        // the exponential to 1 ulp and two products, each half; more where the slant depth's own rounding counts
+        expectRelative(reduced!, au * au * Math.exp(slant), 5e-16 * (1 + slant));
+      }),
+    );
+  });
   const set = fc.array(
     fc.record({ constant: between(1.9, 2.1), constantStandardError: between(0.001, 0.02) }),
     {

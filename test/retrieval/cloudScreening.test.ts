@@ -56,7 +56,7 @@ describe("independent fixtures", () => {
         if (cloud > 0.02 && codes[t] === 0) totals.missed += 1;
       });
     }
-    expect(totals.cloudy / (40 * 600)).toBeGreaterThan(0.25); // the days are as cloudy as the comment says
+    expect(totals.cloudy / (40 * 600)).toBeGreaterThan(0.25); // over a quarter, as the comment says
     expect(totals.kept / totals.clear).toBeGreaterThan(0.9);
     expect(totals.missed / totals.cloudy).toBeLessThan(0.02);
   });

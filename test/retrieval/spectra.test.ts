@@ -119,6 +119,10 @@ describe("resampleWithCovariance: edges", () => {
     const result = resampleWithCovariance(holed, [400, 405, 425, 440]);
     expect(Array.from(result.values, Number.isNaN)).toEqual([false, true, false, false]);
     expectAbsolute(result.values[0]!, 1, 0);
+    const gap = covariance.map((c, k) => (k === 5 ? Number.NaN : c)); // the variance at 410 nm
+    const spread = resampleWithCovariance({ ...spectrum, covariance: gap }, [400, 405, 425, 440]);
+    const variances = [0, 5, 10, 15].map((k) => spread.covariance[k]!);
+    expect(variances.map(Number.isNaN)).toEqual([false, true, false, false]);
   });
   it("refuses what cannot be", () => {
     expectRefusal(
@@ -248,6 +252,14 @@ describe("removeAtmosphere", () => {
       "removeAtmosphere",
       "at some wavelength",
     );
+  });
+  it("gives NaN where the measurement is NaN, and there alone", () => {
+    const holed = { ...ground, values: ground.values.map((v, i) => (i === 7 ? Number.NaN : v)) };
+    const outside = removeAtmosphere(holed, beam, options);
+    expect(outside.values[7]).toBeNaN();
+    expect(outside.standardUncertainties[7]).toBeNaN();
+    expect(outside.values[8]).toBeGreaterThan(0);
+    expect(outside.standardUncertainties[8]).toBeGreaterThan(0);
   });
   it("scales with the measurement", () => {
     fc.assert(

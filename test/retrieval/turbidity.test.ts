@@ -307,36 +307,42 @@ describe("independent fixtures", () => {
     expectRelative(covariance[0]!, depths[0]!.standardUncertainty ** 2, 1e-14);
     expect(opticalDepthCovariance(depths, [])[1]).toBe(0);
   });
-  it("turns clock and position into zenith angle as differences of the sun's place do", () => {
-    const [hour, date] = [9.2, 120];
-    const z = (h: number, latitude: number): number => sunZenithDeg(date, h, latitude);
-    const perHour = (z(hour + 1e-4, LATITUDE) - z(hour - 1e-4, LATITUDE)) / 2e-4;
-    const perDegree = (z(hour, LATITUDE + 1e-3) - z(hour, LATITUDE - 1e-3)) / 2e-3;
-    // azimuth from north: the latitude derivative is minus its cosine; the sun is east in the morning
-    const sunAzimuthDeg = (Math.acos(-perDegree) * 180) / Math.PI;
-    const sight = { latitudeDeg: LATITUDE, sunAzimuthDeg };
-    const of = (s: number, lat: number, lon: number): number =>
-      zenithStandardUncertainty({
-        ...sight,
-        timeStandardUncertaintyS: s,
-        latitudeStandardUncertaintyDeg: lat,
-        longitudeStandardUncertaintyDeg: lon,
-      });
-    expectRelative(of(10, 0, 0), (Math.abs(perHour) * 10) / 3600, 1e-6);
-    expectRelative(of(0, 0, 0.01), (Math.abs(perHour) * 0.01) / 15, 1e-6);
-    expectRelative(of(0, 0.01, 0), Math.abs(perDegree) * 0.01, 1e-6);
-    expectRelative(
-      of(10, 0.02, 0.01),
-      Math.hypot(of(10, 0, 0), of(0, 0.02, 0), of(0, 0, 0.01)),
-      1e-12,
-    );
-  });
+  it.each([
+    [9.2, 120],
+    [6.5, 172],
+    [11.3, 355],
+  ])(
+    "turns clock and position into zenith angle at %d h of day %d as differences of the sun's place do",
+    (hour, date) => {
+      const z = (h: number, latitude: number): number => sunZenithDeg(date, h, latitude);
+      const perHour = (z(hour + 1e-4, LATITUDE) - z(hour - 1e-4, LATITUDE)) / 2e-4;
+      const perDegree = (z(hour, LATITUDE + 1e-3) - z(hour, LATITUDE - 1e-3)) / 2e-3;
+      // azimuth from north: the latitude derivative is minus its cosine; the sun is east in the morning
+      const sunAzimuthDeg = (Math.acos(-perDegree) * 180) / Math.PI;
+      const sight = { latitudeDeg: LATITUDE, sunAzimuthDeg };
+      const of = (s: number, lat: number, lon: number): number =>
+        zenithStandardUncertainty({
+          ...sight,
+          timeStandardUncertaintyS: s,
+          latitudeStandardUncertaintyDeg: lat,
+          longitudeStandardUncertaintyDeg: lon,
+        });
+      expectRelative(of(10, 0, 0), (Math.abs(perHour) * 10) / 3600, 1e-6);
+      expectRelative(of(0, 0, 0.01), (Math.abs(perHour) * 0.01) / 15, 1e-6);
+      expectRelative(of(0, 0.01, 0), Math.abs(perDegree) * 0.01, 1e-6);
+      expectRelative(
+        of(10, 0.02, 0.01),
+        Math.hypot(of(10, 0, 0), of(0, 0.02, 0), of(0, 0, 0.01)),
+        1e-12,
+      );
+    },
+  );
   it("differentiates an air mass", () => {
     const secant = (z: number): number => 1 / Math.cos((z * Math.PI) / 180);
-    for (const z of [0, 30, 60, 85]) {
+    for (const z of [0, 0.005, 0.01, 1, 30, 60, 80, 85]) {
       const exact = (secant(z) * Math.tan((z * Math.PI) / 180) * Math.PI) / 180;
-      // 0.02° across: third derivative term, under 1e-4 to 85°; at 0 one-sided, 0.005° of slope per degree squared
-      expectAbsolute(airMassPerDegree(secant, z), exact, 1e-4 * exact + 2e-6);
+      // 0.02° across: third derivative term, (0.01 / 5)² at 85°; one-sided near 0: up to 0.005° of 3.05e-4 per degree squared
+      expectAbsolute(airMassPerDegree(secant, z), exact, z < 0.01 ? 1.6e-6 : 5e-6 * exact);
     }
   });
 });

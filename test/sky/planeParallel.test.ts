@@ -98,6 +98,34 @@ describe("independent fixtures", () => {
     }
   });
 
+  it("with 32 streams is within 3e-7 of doubling and adding on 20 nodes, which knows nothing of the streams here", () => {
+    const nodes = 20;
+    const dirs = directions(nodes, cosines);
+    const slabs = ([0, 1, 2] as const).map((order) =>
+      doublingMode(order, dirs, 0.0279).layer(0.5, 1),
+    );
+    const sky = molecules(0.5, { depolarisation: 0.0279 });
+    for (const [k0, m0] of cosines.entries()) {
+      const lit = illuminateSky(sky, zenithOf(m0));
+      for (const [k, m] of cosines.entries()) {
+        for (const az of [0, 70, 180]) {
+          for (const at of ["ground", "top"] as const) {
+            const view = { viewZenithDeg: zenithOf(m), relativeAzimuthDeg: az, at };
+            skyStokes(lit, view).forEach((value, row) => {
+              const sum = slabs.reduce((s, { r, t }, order) => {
+                const phase = (order * az * Math.PI) / 180;
+                const f = row === 2 ? Math.sin(phase) : Math.cos(phase);
+                const slab = at === "top" ? r : t;
+                return s + m0 * f * slab[3 * (nodes + k) + row]![3 * (nodes + k0)]!;
+              }, 0);
+              expectAbsolute(value, sum, 3e-7); // 20 nodes are 5e-8 from the limit
+            });
+          }
+        }
+      }
+    }
+  });
+
   it("tends to single scattering in thin air, with signs", () => {
     // one scattering written with the angle between the beams and turns of the planes (Hansen & Travis 1974, section 2)
     const depth = 1e-5;
@@ -208,6 +236,23 @@ describe("properties", () => {
       ),
       { numRuns: 60 },
     );
+  });
+
+  it.each([
+    [[1000], 1e-10],
+    [[5, 0.1, 300], 1e-10],
+    [[1e4], 1e-9],
+    [[1e4, 1e4], 1e-9],
+  ])("keeps energy in layers of depth %j to %d", (depths, error) => {
+    const layers = depths.map((rayleighDepth) => ({ rayleighDepth, absorptionDepth: 0 }));
+    for (const groundAlbedo of [0, 0.5, 1]) {
+      const sky = prepareSky({ layers, depolarisation: 0.0279, groundAlbedo });
+      for (const sun of [0, 60, 89]) {
+        const { direct, diffuseDown, up } = skyFluxes(illuminateSky(sky, sun));
+        const net = direct.map((d, b) => d + diffuseDown[b]! - up[b]!);
+        for (const value of net) expectAbsolute(value, net[0]!, error);
+      }
+    }
   });
 
   it("is reciprocal: sun and eye change places", () => {

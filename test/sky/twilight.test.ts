@@ -245,6 +245,26 @@ describe("all orders", () => {
     },
   );
 
+  // mean and standard error of `backward(blue, sun, look, randomSource(7), 2_400_000)`: a minute each, so kept here
+  it.each([
+    [60, 30, 60, 0.0688265, 8.5e-5],
+    [85, 60, 90, 0.0380387, 5.6e-5],
+    [90, 0, 0, 0.00542795, 6.2e-6],
+    [92, 45, 180, 0.00282365, 4.1e-6],
+    [93, 60, 90, 0.00127006, 2.9e-6],
+    [94, 30, 0, 0.000401532, 1.2e-6],
+    [95, 45, 90, 0.000117006, 5.7e-7],
+    [96, 75, 0, 0.000335718, 9.3e-7],
+    [96, 45, 180, 3.27233e-5, 2.5e-7],
+  ])(
+    "sun %d°, view %d°, azimuth %d° lies within the stated error of a hundred times as many photons",
+    (sunDeg, zenithDeg, azimuthDeg, mean, error) => {
+      const stated = sunDeg <= 93 ? 0.005 : 0.013;
+      expect(error / mean).toBeLessThan(0.6 * stated); // sharp enough to tell
+      expectRelative(seen(sunDeg, zenithDeg, azimuthDeg)[0], mean, stated);
+    },
+  );
+
   it("meets the flat layers where both hold, and leaves them as the sun sinks", () => {
     const layers = [
       { rayleighDepth: 0, absorptionDepth: 0.001 },

@@ -104,6 +104,19 @@ describe("quantiles", () => {
   ])("Student's t to 1e-12 at %d, %d", (probability, degrees, factor) => {
     expectRelative(coverageFactor(probability, degrees), factor, 1e-12);
   });
+  // 20-digit values as above: small probabilities and thousands of degrees of freedom, and both ends of the range
+  it.each([
+    [0.9, 9999, 1.6450060333112995964, 5e-12],
+    [0.3, 9999, 0.38533153097705624897, 5e-12],
+    [0.001, 9999, 0.0012533458018687057904, 5e-12],
+    [0.9999, 1, 6366.1976713166369204, 1e-12],
+    [0.9999, 2.5, 46.024215246951951507, 1e-12],
+    [1e-6, 4, 1.3333333333338271002e-6, 1e-10],
+    [1 - 1e-12, 1, 636633855803.55930338, 1e-4],
+    [1 - 1e-12, 30, 11.722018886810610596, 1e-4],
+  ])("Student's t at %d, %d to %d", (probability, degrees, factor, error) => {
+    expectRelative(coverageFactor(probability, degrees), factor, error);
+  });
   it("joins the expansion and the root at 10 000 degrees of freedom", () => {
     expectRelative(coverageFactor(0.95, 10000.001), coverageFactor(0.95, 9999.999), 1e-10);
     expectRelative(coverageFactor(0.95, Infinity), 1.9599639845400545, 1e-15);
