@@ -16,7 +16,7 @@ function frame(): string {
       { "-90": "start", "90": "end" }[angle] ?? "middle",
       { "-90": "horizon behind you", "0": "overhead", "90": "horizon" }[angle] ?? "",
     ];
-    return `<line class="axis" x1="${x(angle)}" x2="${x(angle)}" y1="${TOP + HEIGHT}" y2="${TOP + HEIGHT + 6}"/><text x="${x(angle)}" y="${TOP + HEIGHT + 21}" text-anchor="${anchor}">${word}</text>`;
+    return `<line class="axis" x1="${x(angle)}" x2="${x(angle)}" y1="${TOP + HEIGHT}" y2="${TOP + HEIGHT + 6}"/><text x="${x(angle)}" y="${TOP + HEIGHT + 26}" text-anchor="${anchor}">${word}</text>`;
   });
   return `<defs><linearGradient id="sky-colours">${stops.join("")}</linearGradient></defs>
 <rect class="sky" x="0" y="${TOP}" width="${WIDTH}" height="${HEIGHT}" rx="6"/>${marks.join("")}

@@ -17,7 +17,7 @@ function path({ wavelengthsNm, values }: Spectrum): string {
 function axes(): string {
   const along = [300, 400, 500, 600, 700, 800, 900, 1000, 1100].map(
     (nm) =>
-      `<line class="axis" x1="${x(nm)}" x2="${x(nm)}" y1="${BOTTOM}" y2="${BOTTOM + 5}"/><text x="${x(nm)}" y="${BOTTOM + 20}" text-anchor="middle">${nm}</text>`,
+      `<line class="axis" x1="${x(nm)}" x2="${x(nm)}" y1="${BOTTOM}" y2="${BOTTOM + 5}"/><text${nm % 200 === 0 ? ' class="between"' : ""} x="${x(nm)}" y="${BOTTOM + 25}" text-anchor="${nm === 1100 ? "end" : "middle"}">${nm}</text>`,
   );
   const up = [0, 0.5, 1, 1.5, 2].map(
     (value) =>

@@ -74,7 +74,12 @@ const form = element<HTMLFormElement>("form");
 form.addEventListener("input", update);
 form.addEventListener("change", keepAddress);
 form.addEventListener("submit", (event) => event.preventDefault());
-form.addEventListener("reset", () => setTimeout(update));
+form.addEventListener("reset", () =>
+  setTimeout(() => {
+    update();
+    keepAddress();
+  }),
+);
 addEventListener("hashchange", () => {
   readAddress();
   update();

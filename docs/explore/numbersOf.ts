@@ -13,13 +13,13 @@ export function numbersOf(view: View): [name: string, value: string][] {
   return [
     ["Air mass", view.airMass.toFixed(3)],
     ["Ozone mass", view.ozoneMass.toFixed(3)],
-    ["Illuminance, facing the sun", `${digits(view.illuminanceLx)} lx`],
-    ["Illuminance, level ground", `${digits(view.levelLx)} lx`],
+    ["Direct illuminance, facing the sun", `${digits(view.illuminanceLx)} lx`],
+    ["Direct illuminance, level ground", `${digits(view.levelLx)} lx`],
     [
       "Luminance of the sky overhead",
       view.zenithLuminance === undefined ? "not computed" : `${digits(view.zenithLuminance)} cd/m²`,
     ],
-    ["Irradiance, 300 to 1100 nm", `${digits(view.irradiance)} W/m²`],
+    ["Direct irradiance, 300 to 1100 nm", `${digits(view.irradiance)} W/m²`],
     [
       "Colour temperature",
       colourTemperatureK === undefined ? "none" : `${digits(colourTemperatureK)} K`,

@@ -18,12 +18,15 @@ import { sourcesPage } from "./sources.js";
 const SITE = `${ROOT}.cache/site/`;
 const OUT = `${ROOT}.docs/`;
 
+/** Links to the guides that stand in examples, as .cache/site, one folder deeper than docs, must name them. */
+const fromSite = (text: string): string => text.replaceAll("](../examples/", "](../../examples/");
+
 /** Markdown pages, in .cache/site. */
 function writePages(): void {
   const results = runBlocks(pageBlocks(), `${ROOT}.cache/pictures/`);
   for (const path of filesUnder("docs", ".md"))
     if (!path.startsWith("docs/rooms/"))
-      writePage(SITE + path.slice("docs/".length), withPictures(path, results));
+      writePage(SITE + path.slice("docs/".length), fromSite(withPictures(path, results)));
   writePage(`${SITE}quantities.md`, quantitiesPage());
   writePage(`${SITE}sources.md`, sourcesPage());
 }

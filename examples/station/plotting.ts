@@ -29,7 +29,7 @@ export function standalone(svg: string): string {
   const paper = '<rect width="100%" height="100%" fill="#fff"/>';
   const file = svg
     .replace('style="', 'style="color:#20262e;')
-    .replace("</style>", `</style>${paper}`);
+    .replace(/<svg[^>]*>/, (head) => head + paper);
   const named = file.includes("xmlns=") ? file : file.replace("<svg", `<svg ${SVG_NAMESPACE}`);
   return `<?xml version="1.0" encoding="UTF-8"?>\n${named}\n`;
 }
