@@ -3,6 +3,7 @@ import { describe, expect, it } from "vitest";
 import {
   airMassKastenWater,
   airMassKastenYoung,
+  airMassPickering,
   airMassShell,
   airMassYoung,
   refractionBennett,
@@ -203,6 +204,12 @@ describe("edges", () => {
   it("refractionSaemundsson reaches the apparent horizon", () => {
     expectAbsolute(90.6 - refractionSaemundsson(90.6, weather), 90, 0.05);
     expectRefusal(() => refractionSaemundsson(90.7, weather), RangeError, "0 to 90.6 degrees");
+  });
+  it("Pickering's lift close to the horizon and on it", () => {
+    for (const h of [0, 0.0005, 0.5]) {
+      const lifted = h + 244 / (165 + 47 * h ** 1.1);
+      expectRelative(airMassPickering(90 - h), 1 / Math.sin((lifted * Math.PI) / 180), 2e-13); // 90 - h is off by 7e-15°
+    }
   });
   it("the surface state and the shell", () => {
     for (const refraction of [refractionSaemundsson, refractionBennett]) {

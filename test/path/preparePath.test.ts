@@ -173,6 +173,7 @@ describe("properties", () => {
     for (const [prepared, list] of [
       [high, zeniths],
       [path, grounded],
+      [path, grounded.subarray(3, 399)], // rising rays alone
     ] as const) {
       const each = (f: (z: number) => number): number[] => Array.from(list, f);
       expect([...airMassesOnPath(list, prepared)]).toEqual(each((z) => airMassOnPath(z, prepared)));
@@ -365,6 +366,20 @@ describe("weather through the day", () => {
       "width of temperatureRangeK",
       "41",
     );
+    for (const [pressureRangePa, ...parts] of [
+      [[9990, 12_000], "pressureRangePa[0]", "10000 to 140000"],
+      [[135_000, 140_100], "pressureRangePa[1]", "140100"],
+      [[99_000, 109_005], "width of pressureRangePa", "10000", "10005"],
+    ] as const)
+      expectRefusal(bad({ pressureRangePa }), RangeError, ...parts);
+    for (const [temperatureRangeK, ...parts] of [
+      [[179.9, 200], "temperatureRangeK[0]", "180 to 380"],
+      [[350, 380.2], "temperatureRangeK[1]", "380.2"],
+      [[270, 310.02], "width of temperatureRangeK", "40"],
+    ] as const)
+      expectRefusal(bad({ temperatureRangeK }), RangeError, ...parts);
+    const wide = bad({ pressureRangePa: [10_000, 10_001], temperatureRangeK: [280, 280.1] });
+    expect(wide).not.toThrow();
     expectRefusal(bad({ temperatureRangeK: [2, 22] }), RangeError, "temperatureRangeK[0]", "°C");
     expectRefusal(bad({ pressureRangePa: 101_000 }), TypeError, "pressureRangePa");
     expectRefusal(bad({ altitudeM: -5 }), RangeError, "prepareWeatherPaths", "altitudeM");
@@ -429,6 +444,8 @@ describe("edges", () => {
       TypeError,
       "a constituent of the path (ozone, water)",
     );
+    const one = preparePath({ ...sea, constituents: { ozone: constituents.ozone } });
+    expectRefusal(() => constituentMassOnPath(45, one, "smoke" as never), TypeError, "(ozone)");
     const bare = preparePath({ ...sea, constituents: {} });
     expectRefusal(() => constituentMassOnTruePath(45, bare, "ozone" as never), TypeError, "(none)");
     expectRefusal(

@@ -393,6 +393,42 @@ describe("properties", () => {
   });
 });
 
+describe("odd air", () => {
+  it("leads back from the true angle over hot ground, where refraction falls towards the horizon", () => {
+    // 0.8 K a metre over the lowest 20 m, balanced by the mean temperature of each step
+    const rows: {
+      heightM: number;
+      temperatureK: number;
+      pressurePa: number;
+      relativeHumidity: 0;
+    }[] = [];
+    let [pressurePa, lastM, lastK] = [101325, 0, 300];
+    for (const heightM of [0, 5, 10, 20, 60, 300, 1000, 3000, 6000, 10_000]) {
+      const temperatureK = heightM <= 20 ? 300 - 0.8 * heightM : 284 - 0.0065 * (heightM - 20);
+      pressurePa *= Math.exp((-0.0341632 * (heightM - lastM)) / ((temperatureK + lastK) / 2));
+      rows.push({ heightM, temperatureK, pressurePa, relativeHumidity: 0 });
+      [lastM, lastK] = [heightM, temperatureK];
+    }
+    const hot = { ...input, profile: tabulatedProfile(rows) };
+    expect(arcsec(89.9, hot)).toBeLessThan(arcsec(89.5, hot) - 200);
+    for (const seen of [60, 88, 89.3, 89.6, 89.8, 89.9, 89.97, 90]) {
+      const { trueZenithDeg } = refractedPath(seen, hot);
+      expectAbsolute(apparentZenith(trueZenithDeg, hot), seen, 1e-11);
+    }
+  });
+  it("does not care how much of a constituent there is", () => {
+    const layer = (most: number) =>
+      tabulatedLayer([
+        { heightM: 1000, density: 0 },
+        { heightM: 3000, density: most },
+        { heightM: 5000, density: 0 },
+      ]);
+    const of = (most: number): number =>
+      refractedPath(80, { ...input, constituents: { smoke: layer(most) } }).masses.smoke;
+    expectRelative(of(1e-12), of(1), 1e-13);
+  });
+});
+
 describe("edges", () => {
   it("is continuous through 90° with its slope, from a height", () => {
     const high = { ...input, altitudeM: 3000 };
