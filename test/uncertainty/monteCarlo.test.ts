@@ -252,6 +252,7 @@ describe("edges", () => {
     expect(exact.value).toBe(6);
     expect(exact.standardUncertainty).toBe(0);
     expect(exact.budget[0]!.share).toBe(0);
+    expect(exact.budget[0]!.sensitivity).toBe(0);
     expect(exact.stable).toBe(true);
   });
   it("says so when it stops before the digits stand still", () => {
