@@ -85,8 +85,15 @@ addEventListener("hashchange", () => {
   update();
 });
 element("#copy").addEventListener("click", async () => {
-  await navigator.clipboard.writeText(element<HTMLTextAreaElement>("#code").value);
-  element("#copied").textContent = "copied";
+  const code = element<HTMLTextAreaElement>("#code");
+  try {
+    await navigator.clipboard.writeText(code.value);
+    element("#copied").textContent = "copied";
+  } catch {
+    code.focus();
+    code.select(); // no clipboard here: one key is left to press
+    element("#copied").textContent = "selected: copy it with Ctrl C";
+  }
 });
 readAddress();
 update();

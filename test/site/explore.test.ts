@@ -33,7 +33,7 @@ describe("the state shown", () => {
     const results = runBlocks(blocks, `${ROOT}.cache/explore/`);
     for (const { id, where } of blocks) {
       expect(results[id]?.errors, where).toEqual([]);
-      expect(results[id]?.checked, where).toBeGreaterThan(2);
+      expect(results[id]?.checked, where).toBeGreaterThan(8);
     }
   });
 
@@ -87,6 +87,19 @@ describe.skipIf(CHROMIUM === undefined)("the page in Chromium", () => {
     expect(page.url()).toContain("heightDeg=29.5&altitudeM=50");
     await page.keyboard.press("End");
     expect(await code()).toContain("const altitudeM = 5000;");
+  });
+
+  it("selects the code where there is no clipboard", async () => {
+    await page.evaluate(() => {
+      navigator.clipboard.writeText = () => Promise.reject(new Error("none"));
+    });
+    await page.locator("#copy").click();
+    expect(await page.locator("#copied").textContent()).toContain("Ctrl C");
+    const selected = await page.evaluate(() => {
+      const box = document.querySelector("#code") as HTMLTextAreaElement;
+      return box.selectionEnd - box.selectionStart === box.value.length && box.value.length > 0;
+    });
+    expect(selected).toBe(true);
   });
 
   it("opens at the state of its address, and goes back to the start", async () => {
