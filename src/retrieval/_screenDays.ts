@@ -2,7 +2,7 @@
 import type { ArchiveResult, ArchiveSettings } from "./_archive.js";
 import { cloudScreening } from "./cloudScreening.js";
 
-/** A gap as long as this parts two days, minutes. */
+/** A gap longer than this parts two days, minutes. */
 const NIGHT_MINUTES = 180;
 
 /** Fills `result.screening` from the depths of the screened channel. */

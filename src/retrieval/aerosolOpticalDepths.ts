@@ -15,7 +15,7 @@ import { screenDays } from "./_screenDays.js";
  * Aerosol optical depths, standard uncertainties and cloud screening of many readings in several channels.
  *
  * Model: as `aerosolOpticalDepth` for each reading and channel, then `cloudScreening` on one channel day by day (a new day
- * begins after a gap of three hours). The slope of every air mass with the zenith angle is taken as m √(m² - 1) per radian, a flat
+ * begins after a gap of more than three hours). The slope of every air mass with the zenith angle is taken as m √(m² - 1) per radian, a flat
  * atmosphere's; it is used for the uncertainty alone.
  * Validity: as `aerosolOpticalDepth`. A NaN or a signal that is not above 0 gives NaN at that place, and code 1 of the
  * screening if it is in the screened channel.
