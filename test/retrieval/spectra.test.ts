@@ -119,6 +119,8 @@ describe("resampleWithCovariance: edges", () => {
     const result = resampleWithCovariance(holed, [400, 405, 425, 440]);
     expect(Array.from(result.values, Number.isNaN)).toEqual([false, true, false, false]);
     expectAbsolute(result.values[0]!, 1, 0);
+    const late = { ...spectrum, values: Float64Array.of(1, 1.4, Number.NaN, 2) };
+    expect(resampleWithCovariance(late, [450]).values[0]).toBe(2);
   });
   it("refuses what cannot be", () => {
     expectRefusal(
