@@ -51,7 +51,7 @@ export const RETRIEVAL: readonly Equivalent[] = [
     path: "src/retrieval/_randomEffects.ts",
     line: "for (let step = 0; step < 60",
     literals: ["0", "60"],
-    why: "fewer halvings already reach double precision",
+    why: "fewer halvings already leave less than the rounding of the variances it is added to",
   },
   {
     path: "src/retrieval/_screeningRules.ts",
