@@ -40,7 +40,7 @@ export function cleanedLine(x: Float64Array, y: Float64Array, weights: Float64Ar
     );
     const line = weightedLine(nearX!, nearY!, nearW!);
     const settled = round > 1 && near.length === kept.length && near.every((i, k) => i === kept[k]);
-    if (settled || round === MOST_ROUNDS) return { line, scores };
+    if (settled || round >= MOST_ROUNDS) return { line, scores };
     guess = line;
     kept = near;
   }
@@ -52,5 +52,5 @@ function scaleOf(distances: Float64Array): number {
 }
 
 function total(values: Float64Array): number {
-  return values.reduce((sum, value) => sum + value, 0);
+  return values.reduce((sum, value) => sum + value);
 }

@@ -5,9 +5,12 @@ import { median } from "./_median.js";
 
 /** Median absolute deviation to standard deviation of a normal scatter: 1 / 0.67449. */
 const NORMAL_MEDIAN = 1.482602;
+/** Scatter below this (in units of the data) counts as this much: rounding is no ground for rejection. */
+const LEAST_SCALE = 1e-9;
 /** Rounds of reweighting towards least absolute deviations, and the residual (in units of the data) that counts as none. */
 const ABSOLUTE_ROUNDS = 60;
 const SMALL = 1e-7;
+/** The set of kept points settles in a few rounds; one that swings to and fro is stopped. */
 const MOST_ROUNDS = 30;
 
 /** What `cleanedPlane` returns. */
@@ -16,7 +19,7 @@ export interface CleanedPlane {
   readonly fit: LinearFit;
   /** Places of the kept points. */
   readonly kept: readonly number[];
-  /** Distance of every point from the fit over the robust scale, weighted. */
+  /** Distance of every point from the fit over the robust scale, signed, weighted. */
   readonly scores: Float64Array;
 }
 
@@ -31,7 +34,8 @@ export function cleanedPlane(
   weights: Float64Array,
   limit: number,
 ): CleanedPlane | undefined {
-  const roots = weights.map(sqrt);
+  const meanWeight = weights.reduce((sum, weight) => sum + weight) / weights.length;
+  const roots = weights.map((weight) => sqrt(weight / meanWeight));
   let fit = leastAbsolute(columns, data, roots);
   let kept = Array.from(data.keys());
   for (let round = 0; fit !== undefined; round++) {
@@ -44,14 +48,14 @@ export function cleanedPlane(
     const distances = Float64Array.from(kept, (i) => Math.abs(off[i]!));
     const scale =
       (NORMAL_MEDIAN * median(distances) * kept.length) / (kept.length - columns.length);
-    const scores = off.map((value) => value / Math.max(Number.MIN_VALUE, scale, SMALL * SMALL));
+    const scores = off.map((value) => value / Math.max(LEAST_SCALE, scale));
     const near = Array.from(data.keys()).filter((i) => Math.abs(scores[i]!) <= limit);
     if (near.length <= columns.length) return undefined;
     const pick = (list: Float64Array): Float64Array => Float64Array.from(near, (i) => list[i]!);
     fit = leastSquares(columns.map(pick), pick(data), pick(weights));
     const settled = round > 0 && near.length === kept.length && near.every((i, k) => i === kept[k]);
     kept = near;
-    if (fit !== undefined && (settled || round === MOST_ROUNDS)) return { fit, kept, scores };
+    if (fit !== undefined && (settled || round >= MOST_ROUNDS)) return { fit, kept, scores };
   }
   return undefined;
 }

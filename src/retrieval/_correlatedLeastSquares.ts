@@ -12,8 +12,8 @@ export function correlatedLeastSquares(
   covariance: Float64Array,
 ): LinearFit | undefined {
   const root = choleskyRoot(covariance, data.length);
-  // a zero on the diagonal: some of the data follow wholly from the others
-  if (root === undefined || data.some((_, i) => root[i * data.length + i] === 0)) return undefined;
+  if (root === undefined) return undefined;
+  // where some of the data follow wholly from the others a zero on the diagonal divides: no column has a finite length then
   const divided = columns.map((column) => forward(root, column));
   return leastSquares(divided, forward(root, data), new Float64Array(data.length).fill(1));
 }

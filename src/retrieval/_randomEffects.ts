@@ -1,5 +1,6 @@
 /** A fit to values that scatter by more than their own errors say. */
 import { type LinearFit, leastSquares } from "./_leastSquares.js";
+import { dot } from "./_smallMatrices.js";
 
 /** A fit and the scatter it needed. */
 export interface RandomEffectsFit extends LinearFit {
@@ -26,7 +27,7 @@ export function randomEffectsFit(
   const first = fitWith(0);
   if (first === undefined) return undefined;
   if (!(first.chiSquare > degrees)) return { ...first, addedVariance: 0 };
-  let [low, high] = [0, first.residuals.reduce((sum, r) => sum + r * r, 0)];
+  let [low, high] = [0, dot(first.residuals, first.residuals)];
   for (let step = 0; step < 60; step++) {
     const middle = 0.5 * (low + high);
     if (fitWith(middle)!.chiSquare > degrees) low = middle;

@@ -18,9 +18,7 @@ export function markTriplets(
       const [a, b, c] = [depths[first]!, depths[second]!, depths[i]!];
       const least = Math.min(a, b, c);
       if (Math.max(a, b, c) - least > Math.max(SPREAD, RELATIVE_SPREAD * least)) {
-        codes[first] = 2;
-        codes[second] = 2;
-        codes[i] = 2;
+        for (const place of [first, second, i]) codes[place] = 2;
       }
     }
     [first, second] = [second, i];
@@ -29,8 +27,9 @@ export function markTriplets(
 
 /** Rule 3: counts kept readings within the span by two moving ends. */
 export function markLonely(codes: Uint8Array, times: ArrayLike<number>, span: number): void {
-  let [from, to, kept] = [0, 0, 0];
-  const good = codes.map((code) => (code === 0 ? 1 : 0));
+  let [from, to] = [0, 0];
+  let kept = 0;
+  const good = codes.map((code) => Number(code === 0));
   for (let i = 0; i < codes.length; i++) {
     while (to < codes.length && times[to]! <= times[i]! + span) kept += good[to++]!;
     while (times[from]! < times[i]! - span) kept -= good[from++]!;

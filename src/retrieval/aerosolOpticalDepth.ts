@@ -107,7 +107,7 @@ export function aerosolOpticalDepth(reading: SunReading): AerosolOpticalDepth {
     ...terms.map((term) => part(term.name, term.standardUncertainty, -term.airMass)),
   ]);
   const share = budget.budget[1]!.share;
-  const degreesOfFreedom = share > 0 ? constantDegreesOfFreedom / (share * share) : Infinity;
+  const degreesOfFreedom = constantDegreesOfFreedom / (share * share);
   const factor = studentQuantile(0.95, degreesOfFreedom);
   const expandedUncertainty = factor * budget.standardUncertainty;
   const criterion = opticalDepthCriterion(airMass);

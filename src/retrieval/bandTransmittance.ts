@@ -65,10 +65,11 @@ export function bandTransmittance(
 /** Wavelengths of both curves within the part of the passband that is not zero, rising, each once. */
 function nodesOf(passband: Passband, source: Spectrum): number[] {
   const { wavelengthsNm, values } = passband;
-  const open = Array.from(wavelengthsNm).filter(
+  const lit = wavelengthsNm.filter(
     (_, k) => values[k] !== 0 || (values[k - 1] ?? 0) !== 0 || (values[k + 1] ?? 0) !== 0,
   );
-  const [first, last] = [open[0] ?? wavelengthsNm[0]!, open[open.length - 1] ?? wavelengthsNm[1]!];
+  const open = lit.length ? lit : wavelengthsNm;
+  const [first, last] = [open[0]!, open[open.length - 1]!];
   const all = [...open, ...source.wavelengthsNm].filter((nm) => nm >= first && nm <= last);
   return [...new Set(all)].sort((a, b) => a - b);
 }

@@ -96,14 +96,14 @@ function isCounter(node: ts.Node): boolean {
     if (ts.isForStatement(parent)) return parent.statement !== at;
     if (ts.isNewExpression(parent)) return true;
     if (ts.isCallExpression(parent))
-      return /\.(at|slice|subarray|toFixed|toString|padStart|imul)$/.test(
+      return /\.(at|slice|subarray|toFixed|toPrecision|toString|padStart|imul)$/.test(
         parent.expression.getText(),
       );
     if (ts.isBinaryExpression(parent)) {
       const other = (parent.left === at ? parent.right : parent.left).getText();
       if (
         BITWISE.has(parent.operatorToken.kind) ||
-        /\.length$|^(i|j|k|low|high|index|count)$/.test(other)
+        /\.length$|^(i|j|k|low|high|index|count|codes?(\[.*\])?)$/.test(other)
       )
         return true;
     }

@@ -134,6 +134,12 @@ describe("edges", () => {
       "too little aerosol",
     );
   });
+  it("takes depths as small as their errors allow", () => {
+    const variances = NM.map(() => 1e-16);
+    const small = depths.map((d) => 1e-6 * d);
+    const fit = angstromCurvature(NM, small, { covariance: diagonal(variances), referenceNm: 500 });
+    expectRelative(fit.opticalDepth, 1e-7, 1e-9);
+  });
   it("refuses what cannot be", () => {
     const covariance = diagonal(NM.map(() => 1e-6));
     const curved =
@@ -153,6 +159,11 @@ describe("edges", () => {
       () => angstromCurvature(NM, depths, undefined as never),
       TypeError,
       "referenceNm",
+    );
+    expectRefusal(
+      () => angstromCurvature(NM, [0, ...depths.slice(1)], { covariance, referenceNm: 500 }),
+      RangeError,
+      "opticalDepths[0]",
     );
     const negative = [...depths.slice(0, 5), -0.001];
     expectRefusal(

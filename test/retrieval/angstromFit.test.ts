@@ -111,6 +111,8 @@ describe("edges", () => {
     const nm = [400, 500, 600];
     const call = (waves: unknown, depths: unknown) => () =>
       angstromFit(waves as number[], depths as number[]);
+    expect(call(nm, [100, 100, 1e-9])).not.toThrow();
+    expectRefusal(call(nm, [100.05, 100, 1]), RangeError, "opticalDepths[0]", "above 0, to 100");
     expectRefusal(call(nm, [0.3, 0.2, 0.1, 0.1]), RangeError, "opticalDepths", "3, got 4");
     expectRefusal(call(nm, [0.3, 0, 0.1]), RangeError, "opticalDepths[1]", "got 0", "leave");
     expectRefusal(call(nm, [0.3, Number.NaN, 0.1]), RangeError, "opticalDepths[1]", "NaN");

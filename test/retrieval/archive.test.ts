@@ -21,6 +21,8 @@ import {
   SUMMIT,
 } from "../_stationDays.js";
 import { expectAbsolute, expectRefusal, expectRelative } from "../_tolerance.js";
+import { emptyResult } from "../../src/retrieval/_archive.js";
+import { screenDays } from "../../src/retrieval/_screenDays.js";
 import { masses } from "./_reduction.js";
 
 const settings = {
@@ -225,6 +227,54 @@ describe("properties", () => {
 
 describe("edges", () => {
   const { readings } = archive();
+  /** Readings of one channel with all air masses alike. */
+  const alike = (count: number, signal: number, airMass: number): ArchiveReadings => {
+    const all = (value: number): Float64Array => new Float64Array(count).fill(value);
+    return {
+      timesMinutes: Float64Array.from({ length: count }, (_, i) => i),
+      signals: all(signal),
+      sunDistancesAu: all(1),
+      pressuresPa: all(SUMMIT.pressurePa),
+      ozoneDu: all(300),
+      airMasses: all(airMass),
+      ozoneAirMasses: all(airMass),
+      aerosolAirMasses: all(airMass),
+    };
+  };
+  const alone = { ...settings, screeningChannel: 0 };
+  it("takes any signal above 0", () => {
+    const dim = { ...channels[2]!, constant: 1e-6 };
+    const { opticalDepths } = aerosolOpticalDepths(alike(1, 1e-7, 1), [dim], alone);
+    const known = dim.rayleighDepthPerPa * SUMMIT.pressurePa + 300 * dim.ozoneDepthPerDu;
+    expectAbsolute(opticalDepths[0]!, Math.LN10 - known - dim.otherDepth, 1e-14);
+  });
+  it("does not ask for the zenith angle where the sun is overhead, air masses a little below 1 included", () => {
+    for (const airMass of [1, 0.9997]) {
+      const of = (zenithStandardUncertaintyDeg: number): number =>
+        aerosolOpticalDepths(alike(1, 1, airMass), channels.slice(0, 1), {
+          ...alone,
+          zenithStandardUncertaintyDeg,
+        }).standardUncertainties[0]!;
+      expect(of(1)).toBe(of(0));
+    }
+  });
+  it("screens an archive of one reading", () => {
+    const one = aerosolOpticalDepths(alike(1, 0.1, 1), channels.slice(0, 1), alone);
+    expect(Array.from(one.screening)).toEqual([3]);
+  });
+  it("parts days by gaps of more than three hours", () => {
+    // the last reading of the first day is far off that day's mean, not off the mean of both
+    const depths = Float64Array.from({ length: 41 }, (_, i) => (i < 20 ? 5 : i === 20 ? 5.1 : 6));
+    const screened = (gap: number): number => {
+      const times = depths.map((_, i) => (i <= 20 ? i : i + gap - 1));
+      const result = { ...emptyResult(41, 1), opticalDepths: depths };
+      screenDays(times, 1, { ...alone, windowMinutes: 4 }, result);
+      expect(Array.from(result.screening).filter((code) => code !== 0).length).toBeLessThan(2);
+      return result.screening[20]!;
+    };
+    expect(screened(180)).toBe(0);
+    expect(screened(180.1)).toBe(4);
+  });
   it("gives NaN where a signal is none, and fills the arrays it is given", () => {
     const signals = readings.signals.slice();
     signals[6 * 5 + 2] = Number.NaN;

@@ -321,6 +321,78 @@ describe("properties", () => {
   });
 });
 
+describe("limits", () => {
+  /** Mornings whose constants have these logarithms, with one relative error. */
+  const mornings = (logs: readonly number[], error: number) =>
+    logs.map((x) => ({ constant: Math.exp(x), constantStandardError: error * Math.exp(x) }));
+  const left = (logs: readonly number[], error: number): number[] =>
+    combinedCalibration(mornings(logs, error)).rejected.map(({ index }) => index);
+
+  it("leaves out mornings beyond a modified z-score of 3.5, from five mornings on", () => {
+    // median 0, median distance 0.01
+    const with5 = (z: number): number[] =>
+      left([-0.01, -0.005, 0, 0.01, (0.01 * z) / 0.6745], 1e-6);
+    expect(with5(3.5 * 1.0001)).toEqual([4]);
+    expect(with5(3.5 * 0.9999)).toEqual([]);
+    expect(left([-0.01, 0, 0.01, 10], 1e-6)).toEqual([]);
+    const [one] = combinedCalibration(mornings([0, 0, 0, 0, 0.05], 0.01)).rejected;
+    expect(one!.reason).toBe("modified z-score 5.0 from the median of all mornings");
+  });
+  it("counts no distance as far that is within 3.5 of the morning's own error", () => {
+    expect(left([0, 0, 0, 0, 0.035 * 1.0001], 0.01)).toEqual([4]);
+    expect(left([0, 0, 0, 0, 0.035 * 0.9999], 0.01)).toEqual([]);
+  });
+  it("says what the fits alone would: their error over the root of their number", () => {
+    const { fitStandardError, constant } = combinedCalibration(
+      mornings([0.1, 0.2, 0.3, 0.4], 0.01),
+    );
+    expectRelative(fitStandardError, 0.005 * constant, 1e-12);
+  });
+  it("covers 95 % of a drift by Student's factor, two degrees of freedom less than calibrations", () => {
+    const factor = (count: number): number => {
+      const drift = calibrationDrift(
+        mornings(
+          Array.from({ length: count }, () => 0.3),
+          0.01,
+        ).map((m, timeDays) => ({
+          timeDays,
+          constant: m.constant,
+          standardUncertainty: m.constantStandardError,
+        })),
+      );
+      expect(drift.degreesOfFreedom).toBe(count - 2);
+      expect([drift.covariance[0][1], drift.covariance[1][0]]).toEqual([0, 0]);
+      const at = calibrationAt(1, drift);
+      return at.expandedUncertainty / at.standardUncertainty;
+    };
+    // table of Student's t: half of the last digit
+    expectAbsolute(factor(3), 12.7062, 5e-5);
+    expectAbsolute(factor(4), 4.3027, 5e-5);
+  });
+  it("takes signals of any size above 0", () => {
+    const airMasses = Array.from({ length: 10 }, (_, i) => 1 + 0.3 * i);
+    const { constant, rejected } = transferredCalibration({
+      signals: airMasses.map((x) => 1e-6 * Math.exp(-x)),
+      referenceSignals: airMasses.map((x) => 2e-6 * Math.exp(-x)),
+      airMasses,
+      referenceConstant: 2e-6,
+      referenceStandardUncertainty: 0,
+    });
+    expect(rejected).toEqual([]);
+    expectRelative(constant, 1e-6, 1e-12);
+  });
+  it("reduces by distances of 0.9 to 1.1 au and depths of -100 to 100", () => {
+    const reduced = (sunDistanceAu: number, opticalDepth: number) => (): Float64Array =>
+      reducedSignals([1], { sunDistanceAu, terms: [{ opticalDepth, airMasses: [1] }] });
+    expectRelative(reduced(1.1, 100)()[0]!, 1.21 * Math.exp(100), 1e-13);
+    expectRelative(reduced(0.9, -100)()[0]!, 0.81 * Math.exp(-100), 1e-13);
+    expectRefusal(reduced(1.1005, 0), RangeError, "sunDistanceAu");
+    expectRefusal(reduced(0.8995, 0), RangeError, "sunDistanceAu");
+    expectRefusal(reduced(1, 100.05), RangeError, "terms[0].opticalDepth");
+    expectRefusal(reduced(1, -100.05), RangeError, "terms[0].opticalDepth");
+  });
+});
+
 describe("edges", () => {
   const m = { constant: 2, constantStandardError: 0.01 };
   it("adds nothing where mornings agree better than their errors", () => {

@@ -11,12 +11,12 @@ const steady = (count: number, depth = 0.1): number[] => minutes(count).map(() =
 describe("published values", () => {
   // Smirnov et al. 2000 (from memory): a triplet may spread by 0.02, or by 3 % where the depth is above 0.67
   it.each([
-    [0.1, 0.0199, 0],
-    [0.1, 0.0201, 2],
-    [0.6, 0.0199, 0],
-    [0.6, 0.0201, 2],
-    [2, 0.0599, 0],
-    [2, 0.0601, 2],
+    [0.1, 0.01999, 0],
+    [0.1, 0.02001, 2],
+    [0.6, 0.01999, 0],
+    [0.6, 0.02001, 2],
+    [2, 0.05998, 0],
+    [2, 0.06002, 2],
   ])("triplet about %d that spreads by %d", (depth, spread, code) => {
     const depths = steady(60, depth);
     depths[30] = depth + spread;
@@ -24,6 +24,39 @@ describe("published values", () => {
     expect(Array.from(codes.slice(28, 33))).toEqual(Array(5).fill(code));
     expect(codes[27]).toBe(0);
     expect(codes[33]).toBe(0);
+  });
+});
+
+describe("limits", () => {
+  /** 20 readings of 5 ± spread in turn and a last one of 5 + step: triplets may differ by 0.15 there. */
+  const stepped = (spread: number, step: number): number[] => [
+    ...minutes(20).map((i) => 5 + spread * (1 - 2 * (i % 2))),
+    5 + step,
+  ];
+  const last = (depths: number[]): number =>
+    cloudScreening(minutes(depths.length), depths, 4).at(-1)!;
+
+  it("takes depths from -0.01 on", () => {
+    const depths = steady(9, -0.01);
+    depths[4] = -0.010005;
+    expect(Array.from(cloudScreening(minutes(9), depths, 4))).toEqual([0, 0, 0, 0, 1, 0, 0, 0, 0]);
+  });
+  it("looks at the first three readings", () => {
+    expect(Array.from(cloudScreening([0, 1, 2], [0.1, 0.1, 0.2], 4))).toEqual([2, 2, 2]);
+    expect(Array.from(cloudScreening([0, 1, 2], [0.2, 0.1, 0.1], 2))).toEqual([2, 2, 2]);
+    expect(Array.from(cloudScreening([0, 1, 2.01], [0.2, 0.1, 0.1], 2))).toEqual([3, 0, 3]);
+  });
+  it("looks for readings far off on days that vary by 0.015 or more", () => {
+    // 20 equal ones and one a step away: standard deviation step / √21, the one 20 / √21 = 4.4 of them off the mean
+    expect(last(stepped(0, 0.015005 * Math.sqrt(21)))).toBe(4);
+    expect(last(stepped(0, 0.014995 * Math.sqrt(21)))).toBe(0);
+  });
+  it("calls those far that are beyond three standard deviations", () => {
+    // step 20 / 21 off the mean, variance step² / 21 + spread²
+    const times = (n: number): number[] =>
+      stepped(0.1 * Math.sqrt((20 / 21 / n) ** 2 - 1 / 21), 0.1);
+    expect(last(times(3.001))).toBe(4);
+    expect(last(times(2.999))).toBe(0);
   });
 });
 

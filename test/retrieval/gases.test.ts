@@ -292,6 +292,56 @@ describe("independent fixtures", () => {
   });
 });
 
+describe("the nodes of a band", () => {
+  const curve = (wavelengthsNm: number[], values: number[]) => ({
+    wavelengthsNm: Float64Array.from(wavelengthsNm),
+    values: Float64Array.from(values),
+  });
+  it("sums straight passband, source and transmittance exactly between them", () => {
+    const [p, s] = [
+      curve([490, 500, 512, 520], [0, 1, 0.5, 0]),
+      curve([480, 505, 530], [1, 2, 1.5]),
+    ];
+    const through = (nm: number): number => 0.3 + 0.01 * (nm - 490);
+    const passband = (nm: number): number =>
+      nm < 500 ? (nm - 490) / 10 : nm < 512 ? 1 - (nm - 500) / 24 : (520 - nm) / 16;
+    const source = (nm: number): number => (nm < 505 ? 1 + (nm - 480) / 25 : 2 - (nm - 505) / 50);
+    // two Gauss points between nodes do cubics exactly as well
+    const nodes = [490, 500, 505, 512, 520];
+    let [above, below] = [0, 0];
+    for (let k = 1; k < nodes.length; k++) {
+      const [mid, half] = [(nodes[k]! + nodes[k - 1]!) / 2, (nodes[k]! - nodes[k - 1]!) / 2];
+      for (const nm of [mid - half / Math.sqrt(3), mid + half / Math.sqrt(3)]) {
+        above += half * passband(nm) * source(nm) * through(nm);
+        below += half * passband(nm) * source(nm);
+      }
+    }
+    expectRelative(
+      bandTransmittance(p, s, (nm) => -Math.log(through(nm))),
+      above / below,
+      1e-14,
+    );
+  });
+  it("lie where the passband is open: no source and no depth is asked for beyond", () => {
+    const p = curve([300, 310, 490, 500, 510, 800, 900], [0, 0, 0, 1, 0, 0, 0]);
+    const s = curve([490, 510], [1, 1]);
+    const depth = (nm: number): number => (nm > 490 && nm < 510 ? 0.5 : Number.NaN);
+    expectRelative(bandTransmittance(p, s, depth), Math.exp(-0.5), 1e-15);
+    const short = (from: number, to: number) => () =>
+      bandTransmittance(p, curve([from, to], [1, 1]), depth);
+    expectRefusal(short(490.1, 510), RangeError, "cover 490 to 510 nm");
+    expectRefusal(short(490, 509.9), RangeError, "cover 490 to 510 nm");
+  });
+  it("are those of the whole passband where it is closed", () => {
+    const closed = curve([500, 510], [0, 0]);
+    expectRefusal(
+      () => bandTransmittance(closed, curve([500, 510], [1, 1]), () => 1),
+      RangeError,
+      "light within the passband",
+    );
+  });
+});
+
 describe("properties", () => {
   it("recovers any column and smooth aerosol without noise", () => {
     fc.assert(
@@ -377,6 +427,9 @@ describe("edges", () => {
       bandExponentStandardUncertainty: 0,
     };
     expectRefusal(() => precipitableWater(reading), RangeError, "absorption by water");
+    // slant depth s of water: (s / 0.5)^(1 / 0.6) cm; 16 digits of 1 less 6
+    const little = { ...reading, signal: Math.exp(-1e-6), knownSlantDepth: 0 };
+    expectRelative(precipitableWater(little).waterCm, 2e-6 ** (1 / 0.6), 1e-9);
     expectRefusal(
       () => precipitableWater({ ...reading, bandExponent: 0 }),
       RangeError,

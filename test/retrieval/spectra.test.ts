@@ -123,6 +123,8 @@ describe("resampleWithCovariance: edges", () => {
     const spread = resampleWithCovariance({ ...spectrum, covariance: gap }, [400, 405, 425, 440]);
     const variances = [0, 5, 10, 15].map((k) => spread.covariance[k]!);
     expect(variances.map(Number.isNaN)).toEqual([false, true, false, false]);
+    const late = { ...spectrum, values: Float64Array.of(1, 1.4, Number.NaN, 2) };
+    expect(resampleWithCovariance(late, [450]).values[0]).toBe(2);
   });
   it("refuses what cannot be", () => {
     expectRefusal(

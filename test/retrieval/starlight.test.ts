@@ -68,6 +68,7 @@ describe("published values", () => {
     expectAbsolute(opticalDepthToMagnitude(1), 1.0857, 0.00005); // common practice, printed to 0.0001
     expectRelative(opticalDepthToMagnitude(1), 2.5 / Math.log(10), 1e-15);
     expectRelative(magnitudeToOpticalDepth(1), Math.log(10) / 2.5, 1e-15);
+    expectRelative(opticalDepthToMagnitude(1), 2.5 / Math.log(10), 1e-15);
   });
   it("gives Hayes & Latham's Rayleigh extinction at 550 nm and sea level", () => {
     // Hayes & Latham 1975, Astrophys. J. 197, 593 (from memory): 9.4977e-3 λ^-4 c² magnitudes, c their index term
@@ -269,6 +270,9 @@ describe("properties", () => {
     );
     expectRelative(both[0]!.extinction.value, extinctionFit(red, terms)[0]!.extinction.value, 1e-9);
     expect(both[0]!.secondOrder).toEqual({ value: 0, standardUncertainty: 0 });
+    // the second order left out acts as -0.03 × 1.75, the mean air mass; 60 stars of 0.01 give the term to 0.0035: three of those
+    expectAbsolute(both[1]!.colourTerm.value, 0.05 - 0.03 * 1.75, 0.01);
+    expect(both[1]!.colourTerm.standardUncertainty).toBeGreaterThan(0.001);
   });
   it("scales errors by the scatter, not by the stated uncertainties' size", () => {
     const stars = night(7, 0.01, false);
@@ -293,6 +297,22 @@ describe("properties", () => {
 describe("edges", () => {
   const terms = { secondOrder: true, colourTerm: true };
   const stars = night(1, 0.01, false);
+  it("works with three stars more than terms over 0.5 of air mass, and refuses less", () => {
+    const few = (count: number, range: number) => () =>
+      extinctionFit(
+        Array.from({ length: count }, (_, i) => {
+          const airMass = 1 + (range * i) / (count - 1);
+          const magnitude = 0.2 * airMass + 0.01 * Math.sin(5 * i);
+          return { ...stars[0]!, airMass, magnitude, catalogueMagnitude: 0 };
+        }),
+        { secondOrder: false, colourTerm: false },
+      );
+    expect(few(5, 0.5)()[0]!.rejected).toEqual([]);
+    expectRefusal(few(4, 0.5), RangeError, "in B must be at least 5, got 4");
+    const narrow = "in B must span at least 0.5 of air mass, got 0.400";
+    expectRefusal(few(6, 0.4), RangeError, narrow);
+    expect(few(6, 0.4)).toThrow(/0\.400$/);
+  });
   it("refuses what cannot be", () => {
     expectRefusal(
       () => extinctionFit(stars.slice(0, 6), terms),

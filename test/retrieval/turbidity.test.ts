@@ -138,6 +138,19 @@ describe("published values", () => {
     expect(opticalDepthCriterion(1)).toBe(0.015); // 0.005 + 0.010 (World Meteorological Organization, from memory)
     expect(opticalDepthCriterion(5)).toBe(0.007);
   });
+  it("covers 95 % by 1.959964 standard uncertainties, with few calibrations by Student's factor", () => {
+    const factor = (constantDegreesOfFreedom?: number): number => {
+      const { expandedUncertainty, standardUncertainty } = aerosolOpticalDepth({
+        ...plain,
+        signalStandardUncertainty: 0,
+        ...(constantDegreesOfFreedom && { constantDegreesOfFreedom }),
+      });
+      return expandedUncertainty / standardUncertainty;
+    };
+    // tables of the normal and of Student's distribution: half of the last digit
+    expectAbsolute(factor(), 1.959964, 5e-7);
+    expectAbsolute(factor(4), 2.7764, 5e-5);
+  });
   it("makes 1 % of the constant 0.01 of depth at air mass 1", () => {
     const { budget } = aerosolOpticalDepth({ ...plain, constantStandardUncertainty: 0.02 });
     expectRelative(budget[1]!.contribution, 0.01, 1e-12); // common practice: 1 % is 0.01 / m
@@ -306,6 +319,13 @@ describe("independent fixtures", () => {
     expect(covariance[2]).toBe(covariance[1]);
     expectRelative(covariance[0]!, depths[0]!.standardUncertainty ** 2, 1e-14);
     expect(opticalDepthCovariance(depths, [])[1]).toBe(0);
+    // a line that one channel alone has is shared with nobody
+    const without = opticalDepthCovariance(
+      [depths[0]!, aerosolOpticalDepth(plain), depths[1]!],
+      ["Rayleigh"],
+    );
+    for (const k of [1, 3, 5, 7]) expect(without[k]).toBe(0);
+    expect(without[2]).toBe(covariance[1]);
   });
   it.each([
     [9.2, 120],
@@ -417,6 +437,42 @@ describe("edges", () => {
     expect(exact.standardUncertainty).toBe(0);
     expect(exact.degreesOfFreedom).toBe(Number.POSITIVE_INFINITY);
     expect(exact.expandedUncertainty).toBe(0);
+  });
+  it("takes air masses above 0, to 50", () => {
+    expectRelative(opticalDepthCriterion(50), 0.0052, 1e-15);
+    expectRelative(opticalDepthCriterion(1e-4), 100.005, 1e-15);
+    expectRefusal(
+      () => opticalDepthCriterion(50.02),
+      RangeError,
+      "above 0, to 50",
+      "zenith angle?",
+    );
+    expectRefusal(() => opticalDepthCriterion(0), RangeError, "above 0, to 50");
+  });
+  it("takes the difference over 0.02°, inside 0 to 90°", () => {
+    // of (z - z0)³ it is 0.01², of (z - z0)² nothing, but at the ends 0.01; rounding of 50 ± 0.01 is 1e-14
+    for (const z0 of [0.02, 50, 89.98]) {
+      expectAbsolute(
+        airMassPerDegree((z) => (z - z0) ** 3, z0),
+        1e-4,
+        1e-11,
+      );
+      expectAbsolute(
+        airMassPerDegree((z) => (z - z0) ** 2, z0),
+        0,
+        1e-11,
+      );
+    }
+    expectAbsolute(
+      airMassPerDegree((z) => z ** 2, 0),
+      0.01,
+      1e-15,
+    );
+    expectAbsolute(
+      airMassPerDegree((z) => (z - 90) ** 2, 90),
+      -0.01,
+      1e-11,
+    );
   });
   it("ends at the limits of its angles", () => {
     expect(airMassPerDegree(airMassKastenYoung, 90)).toBeGreaterThan(1);
