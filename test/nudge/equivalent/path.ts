@@ -154,6 +154,12 @@ export const PATH: readonly Equivalent[] = [
   },
   {
     path: "src/path/_apparentOf.ts",
+    line: "if (low > 0)",
+    literals: ["0"],
+    why: "makes sure of the bracket; from one of a single sign the first step is a secant, which arrived in all air tried",
+  },
+  {
+    path: "src/path/_apparentOf.ts",
     line: "lower = Math.max(0,",
     literals: ["0"],
     why: "the bracket is degrees wide",
