@@ -237,7 +237,7 @@ describe("sums and nodes", () => {
       const crowded = halfRangeNodes(count);
       for (let power = 0; 3 * power <= 2 * count - 3; power++) {
         const sum = crowded.cosines.reduce((s, c, i) => s + crowded.weights[i]! * c ** power, 0);
-        expectRelative(sum, 1 / (power + 1), (power + 5) * 1e-15); // each factor brings the rounding of its node
+        expectRelative(sum, 1 / (power + 1), (3 * power + 7) * 1e-15); // three factors to a power, two to a weight
       }
     }
   });
