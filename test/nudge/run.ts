@@ -48,6 +48,7 @@ async function runJob(room: string, { tests, nudges }: Job): Promise<Outcome[]> 
       }
       if (report.broken !== undefined) broken = report.broken;
       if (report.noticed !== undefined && nudge) outcomes.push({ nudge, noticed: report.noticed });
+      if (report.noticed === -1 && nudge) console.error(`not noticed: ${lineOf(nudge, -1)}`);
       wind();
     });
     wind();
@@ -104,12 +105,14 @@ await Promise.all(
   }),
 );
 
+/** A change in words: its finer or its coarser value. */
+function lineOf({ path, line, text, changed, source }: Nudge, which: 0 | -1): string {
+  return `${path}:${line}: ${text} -> ${changed.at(which)}   ${source}`;
+}
+
 function list(title: string, some: readonly Outcome[], which: 0 | -1): void {
   if (some.length > 0) console.log(title);
-  for (const { nudge } of some)
-    console.log(
-      `  ${nudge.path}:${nudge.line}: ${nudge.text} -> ${nudge.changed.at(which)}   ${nudge.source}`,
-    );
+  for (const { nudge } of some) console.log(`  ${lineOf(nudge, which)}`);
 }
 const unnoticed = outcomes.filter((o) => o.noticed < 0);
 const blunt = outcomes.filter((o) => o.noticed > 0);
