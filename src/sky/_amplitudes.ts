@@ -4,10 +4,10 @@ import { safeSecants } from "./_beam.js";
 import type { LitSky } from "./illuminateSky.js";
 import { sightComponents } from "./_sight.js";
 
-/** Number of values `sightAmplitudes` writes: A, B of mode 0, d of mode 1, e of mode 2 (see the kernel's file). */
+/** Number of values `sightAmplitudes` adds: A, B of mode 0, d of mode 1, e of mode 2 (see the kernel's file). */
 export const AMPLITUDES = 4;
 
-/** Writes A, B, d, e of the light seen along a line of sight at `cosine` > 0 to `out`, from `start` on. */
+/** Adds A, B, d, e of the light seen along a line of sight at `cosine` > 0 to `out`, from `start` on. */
 export function sightAmplitudes(
   lit: LitSky,
   cosine: number,
@@ -19,7 +19,6 @@ export function sightAmplitudes(
   const views = safeSecants(lit.sky.stacks, 1 / cosine);
   const share = 1 / views.length;
   const pair = new Float64Array(2);
-  for (let k = 0; k < AMPLITUDES; k++) out[start + k] = 0;
   for (const view of views) {
     sightComponents(lit.modes[0], view, upward, pair);
     out[start]! += share * c11 * pair[0]!;

@@ -391,45 +391,52 @@ describe("convergence with streams", () => {
 });
 
 describe("edges", () => {
-  it("does not lose digits where the sun or the eye meets an eigenvalue", () => {
-    const sky = molecules(0.5, { groundAlbedo: 0.3 });
-    for (const { layers } of sky.stacks) {
-      for (const square of layers[0]!.squares) {
-        if (square < 1 || square > 2500) continue;
-        const zenith = zenithOf(1 / Math.sqrt(square));
-        for (const off of [0, 1e-9, 1e-5, 3e-4]) {
-          const at = (sun: number, viewZenithDeg: number, level: "ground" | "top"): number =>
-            skyStokes(illuminateSky(sky, sun), {
-              viewZenithDeg,
-              relativeAzimuthDeg: 40,
-              at: level,
-            })[0];
-          const mean = (f: (z: number) => number): number =>
-            0.5 * (f(zenith - 2e-3) + f(zenith + 2e-3));
-          // the field is smooth in both angles: the mean of two near neighbours is off by their curvature and by `off`
-          const tolerance = 1e-7 + 0.02 * off;
-          for (const level of ["ground", "top"] as const) {
+  it.each([
+    ["without absorption", 0.5, 0],
+    ["with much", 0.05, 0.45], // even the first eigenvalue is one a sun can meet
+  ])(
+    "does not lose digits where the sun or the eye meets an eigenvalue, %s",
+    (_, rayleighDepth, absorptionDepth) => {
+      const layers = [{ rayleighDepth, absorptionDepth }];
+      const sky = prepareSky({ layers, depolarisation: 0, groundAlbedo: 0.3 });
+      for (const { layers } of sky.stacks) {
+        for (const square of layers[0]!.squares) {
+          if (square < 1 || square > 2500) continue;
+          const zenith = zenithOf(1 / Math.sqrt(square));
+          for (const off of [0, 1e-9, 1e-5, 3e-4]) {
+            const at = (sun: number, viewZenithDeg: number, level: "ground" | "top"): number =>
+              skyStokes(illuminateSky(sky, sun), {
+                viewZenithDeg,
+                relativeAzimuthDeg: 40,
+                at: level,
+              })[0];
+            const mean = (f: (z: number) => number): number =>
+              0.5 * (f(zenith - 2e-3) + f(zenith + 2e-3));
+            // the field is smooth in both angles: the mean of two near neighbours is off by their curvature and by `off`
+            const tolerance = 1e-7 + 0.02 * off;
+            for (const level of ["ground", "top"] as const) {
+              expectAbsolute(
+                at(zenith + off, 30, level),
+                mean((z) => at(z, 30, level)),
+                tolerance,
+              );
+              expectAbsolute(
+                at(30, zenith + off, level),
+                mean((z) => at(30, z, level)),
+                tolerance,
+              );
+            }
+            const [m, m30] = [zenith + off, 30].map((z) => Math.cos((z * Math.PI) / 180));
             expectAbsolute(
-              at(zenith + off, 30, level),
-              mean((z) => at(z, 30, level)),
-              tolerance,
-            );
-            expectAbsolute(
-              at(30, zenith + off, level),
-              mean((z) => at(30, z, level)),
-              tolerance,
+              at(zenith + off, 30, "top") * m30!,
+              at(30, zenith + off, "top") * m!,
+              1e-10,
             );
           }
-          const [m, m30] = [zenith + off, 30].map((z) => Math.cos((z * Math.PI) / 180));
-          expectAbsolute(
-            at(zenith + off, 30, "top") * m30!,
-            at(30, zenith + off, "top") * m!,
-            1e-10,
-          );
         }
       }
-    }
-  });
+    },
+  );
 
   it("holds with no scattering, no depth at all, deep air and nearly no absorption", () => {
     const dark = illuminateSky(
@@ -506,7 +513,10 @@ describe("edges", () => {
     );
     refused({ layers: [{ rayleighDepth: 0.1 }] }, TypeError, "layers[0].absorptionDepth");
     refused({ layers: [{ rayleighDepth: 0.1, absorptionDepth: Number.NaN }] }, RangeError, "NaN");
-    refused({ depolarisation: 0.51 }, RangeError, "depolarisation", "0.51");
+    refused({ depolarisation: 0.5001 }, RangeError, "depolarisation", "0.5001");
+    refused({ layers: [{ rayleighDepth: 10_001, absorptionDepth: 0 }] }, RangeError, "10000");
+    refused({ layers: [{ rayleighDepth: 0, absorptionDepth: 10_001 }] }, RangeError, "10001");
+    expect(prepareSky({ ...good, depolarisation: 0.5 }).boundaryDepths[1]).toBe(0.1);
     refused({ groundAlbedo: 25 }, RangeError, "groundAlbedo", "percent");
     refused({ streams: 17 }, RangeError, "streams", "even");
     refused({ streams: 14 }, RangeError, "streams");
