@@ -196,6 +196,15 @@ describe("bandMean", () => {
       { numRuns: 30 },
     );
   });
+  it("takes a passband with a gap in its middle, to both its ends", () => {
+    const line = spectrumOf([400, 600], [4, 6]);
+    // each half is a triangle: its mean lies a third of 100 nm from the end
+    expectRelative(
+      bandMean(line, spectrumOf([400, 500, 600], [3, 0, 1])),
+      (3 * (4 + 1 / 3) + 6 - 1 / 3) / 4,
+      1e-14,
+    );
+  });
   it("takes a passband however narrow", () => {
     const line = spectrumOf([400, 700], [4, 7]);
     expectRelative(
