@@ -167,5 +167,6 @@ describe("edges", () => {
       "µm",
     );
     expectRefusal(() => rayleighOpticalDepth(500, seaLevel as never), TypeError, "airColumn");
+    expectRefusal(() => rayleighOpticalDepth(500, undefined as never), TypeError, "airColumn");
   });
 });
