@@ -6,7 +6,8 @@ export const COMPONENTS = 4;
 /**
  * Writes what air emits for each unit component of its field tensor, per scattering coefficient and solid angle: along a
  * vector e1 square to the sight (four values), along e2 square to both (four), between them (four). `sun1`, `sun2` are the
- * cosines of e1 and e2 from the sun, `z1` that of e1 from the vertical of the place, `sun` that of the sun; e2 is horizontal.
+ * cosines of e1 and e2 from the sun, `z1` that of e1 from the vertical of the place, `sun` that of the sun; e2 is horizontal,
+ * so that parts[7] and parts[10] stay as they were, 0.
  */
 export function emission(
   sun1: number,
@@ -29,9 +30,7 @@ export function emission(
   parts[4] = d * x2 * x2 + even;
   parts[5] = d * (1 - x2 * x2) + even;
   parts[6] = even;
-  parts[7] = 0;
   parts[8] = d * x1 * x2;
   parts[9] = -d * x1 * x2;
-  parts[10] = 0;
   parts[11] = d * x2 * z1;
 }
