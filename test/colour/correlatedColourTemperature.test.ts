@@ -156,7 +156,17 @@ describe("edges", () => {
     expectRefusal(() => correlatedColourTemperature([0, 0, 0]), RangeError, "xyz", "0, 0, 0");
     expectRefusal(() => correlatedColourTemperature([Number.NaN, 1, 1]), RangeError, "NaN");
     expectRefusal(() => correlatedColourTemperature([1, Number.POSITIVE_INFINITY, 1]), RangeError);
-    expectRefusal(() => correlatedColourTemperature([-1, 1, 1]), RangeError, "-1");
+    for (const xyz of [
+      [-1e-9, 1, 1],
+      [1, 1, -1e-9],
+      [1, 0, 1],
+      [1, 1, Number.POSITIVE_INFINITY],
+    ] as const)
+      expectRefusal(() => correlatedColourTemperature(xyz), RangeError, "must be a colour");
+    const green = [0.25, 0.5, 0.25] as const;
+    expectRefusal(() => correlatedColourTemperature(green), RangeError, "chromaticity 0.25, 0.5");
+    const yellow = [0, 0.75, 0] as const; // no light, but a colour: it is its distance that is refused
+    expectRefusal(() => correlatedColourTemperature(yellow), RangeError, "chromaticity 0, 1");
     expectRefusal(() => correlatedColourTemperature([1, 1] as never), RangeError, "3");
     expectRefusal(() => correlatedColourTemperature("D65" as never), TypeError, "xyz");
   });

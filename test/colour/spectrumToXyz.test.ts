@@ -262,6 +262,7 @@ describe("edges", () => {
     expectRefusal(bad(spectrumOf([400, 700], [1])), TypeError, "spectrum");
     expectRefusal(bad(sun, null), TypeError, "observer");
     expectRefusal(() => spectrumToXyz(sun, {} as never), TypeError, "observer");
+    expectRefusal(bad(sun, { ...cie1931Observer, stepNm: 0 }), TypeError, "observer");
     expectRefusal(bad(spectrumOf([400.1, 700], [1, 1])), RangeError, "400 to 700 nm", "400.1");
     expectRefusal(bad(spectrumOf([400, 699.9], [1, 1])), RangeError, "699.9");
     expectRefusal(bad(spectrumOf([0.4, 0.7], [1, 1])), RangeError, "0.4 to 0.7");
@@ -293,7 +294,8 @@ describe("edges", () => {
       RangeError,
       "got 81 and 2",
     );
-    expectRefusal(() => spectraToXyz(one, grid, {} as never), TypeError, "observer");
+    for (const observer of [{}, { stepNm: 0 }, undefined])
+      expectRefusal(() => spectraToXyz(one, grid, observer as never), TypeError, "observer");
     expectRefusal(
       () =>
         spectraToXyz(
