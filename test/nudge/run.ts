@@ -17,8 +17,9 @@ import type { Job, Report } from "./_worker.js";
 
 /** Until a room's tests have passed unchanged. */
 const MOST_SECONDS_BEFORE = 600;
-/** A change whose tests take this long, and fifty times as long as unchanged, is taken for endless, and so for noticed. */
+/** A change whose tests take this long, and so many times as long as unchanged, is taken for endless, and so for noticed. */
 const MOST_SECONDS = 60;
+const MOST_TIMES = 6;
 
 interface Outcome {
   readonly nudge: Nudge;
@@ -44,7 +45,7 @@ async function runJob(room: string, { tests, nudges }: Job): Promise<Outcome[]> 
       const nudge = nudges[outcomes.length];
       if (report.readySeconds !== undefined) {
         broken = "";
-        limit = Math.max(MOST_SECONDS, 50 * report.readySeconds);
+        limit = Math.max(MOST_SECONDS, MOST_TIMES * report.readySeconds);
       }
       if (report.broken !== undefined) broken = report.broken;
       if (report.noticed !== undefined && nudge) outcomes.push({ nudge, noticed: report.noticed });
@@ -61,6 +62,7 @@ async function runJob(room: string, { tests, nudges }: Job): Promise<Outcome[]> 
     }
     if (code === 0) break;
     // the change made a test run forever, or brought the process down
+    console.error(`ended the tests: ${lineOf(nudges[outcomes.length]!, 0)}`);
     outcomes.push({ nudge: nudges[outcomes.length]!, noticed: 0 });
   }
   return outcomes;

@@ -56,4 +56,22 @@ export const SKY: readonly Equivalent[] = [
     literals: ["1e-18"],
     why: "keeps from a division by zero for a sun overhead, where x1 and x2 come out bounded",
   },
+  {
+    path: "src/sky/_fallThroughZero.ts",
+    line: "const STEP_DEG",
+    literals: ["0.5"],
+    why: "how far apart the function is looked at: neutral points lie degrees apart",
+  },
+  {
+    path: "src/sky/_fallThroughZero.ts",
+    line: "for (let k = 1",
+    literals: ["1"],
+    why: "a zero in the first step is found in the second",
+  },
+  {
+    path: "src/sky/_fallThroughZero.ts",
+    line: "> 1e-9",
+    literals: ["1e-9"],
+    why: "where halving ends, far below what could be seen",
+  },
 ];
