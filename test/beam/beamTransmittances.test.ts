@@ -156,6 +156,10 @@ describe("out", () => {
       expectAbsolute(second[i]!, value, 3e-7);
     });
   });
+  it("may be just long enough", () => {
+    const out = new Float64Array(2);
+    expect(beamTransmittances([500, 600], beam, out)).toBe(out);
+  });
   it("is refused when short or of another kind", () => {
     const name = "beamTransmittances";
     expectRefusal(
