@@ -8,6 +8,7 @@ import {
   findPlace,
   type GridPlace,
   gridColumn,
+  lnBetween,
   TENSORS,
   UNKNOWNS,
 } from "./_twilightGrid.js";
@@ -57,7 +58,7 @@ function addGround(p: Probe, target: LaterTarget, tensor: number, lnHere: number
   const column = gridColumn((p.radius * p.sun + groundPath * p.between) / p.groundM);
   const j = Math.floor(column);
   const u = column - j;
-  const ln = (1 - u) * lnGround[j]! + u * lnGround[j + 1]! - lnHere;
+  const ln = lnBetween(j, u, lnGround[j]!, lnGround[j + 1]!) - lnHere;
   const lit = (0.5 * albedo * fromGround * p.solid * exp(ln)) / Math.PI;
   for (let step = 0; step < 2; step++) {
     const part = (step === 0 ? 1 - u : u) * lit;

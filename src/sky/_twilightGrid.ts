@@ -1,21 +1,23 @@
 /** The grid of heights and sun angles that carries light of higher orders. */
-import { acos } from "../_numeric.js";
-import { DEGREES_PER_RADIAN } from "../units.js";
+import { acos, cos, expm1, log } from "../_numeric.js";
+import { DEGREES_PER_RADIAN, RADIANS_PER_DEGREE } from "../units.js";
 import { RAY_TOP_M } from "./_rays.js";
 
 /** Heights: 116 km (i / 15)². */
 export const HEIGHTS = 16;
-/** Sun angles: every 12° to 84°, every 1° from there to 110°. */
-export const ANGLES = 34;
+/** Sun angles: every 20° to 60°, every 3° to 84°, every 1° from there to 110°. */
+export const ANGLES = 38;
 /** Grid points: heights times angles. */
-export const NODES = 544;
+export const NODES = 608;
 /** Tensor components of all grid points, four to each. */
-export const TENSORS = 2176;
+export const TENSORS = 2432;
 /** Unknowns: the tensors, then the diffuse irradiance of the ground under each sun. */
-export const UNKNOWNS = 2210;
-const COARSE_DEG = 12;
-const COARSE = 7;
-const FINE_FROM_DEG = 84;
+export const UNKNOWNS = 2470;
+/** Columns from which the sun is low, and from which it is about to set: before that light goes as the sun's cosine, then as an exponential. */
+const LOW = 3;
+const SETTING = 11;
+const LOW_DEG = 60;
+const SETTING_DEG = 84;
 
 /** Height of row i, m. */
 export function gridHeight(i: number): number {
@@ -25,14 +27,22 @@ export function gridHeight(i: number): number {
 
 /** Sun angle of column j, degrees. */
 export function gridAngle(j: number): number {
-  return j < COARSE ? COARSE_DEG * j : FINE_FROM_DEG + j - COARSE;
+  if (j < LOW) return 20 * j;
+  return j < SETTING ? LOW_DEG + 3 * (j - LOW) : SETTING_DEG + j - SETTING;
 }
 
-/** Column of a sun of cosine `cosine`, as a real number below ANGLES - 1. */
+/** Column of a sun of cosine `cosine`, as a real number below ANGLES - 1; between high suns it counts by the cosine. */
 export function gridColumn(cosine: number): number {
   const angle = acos(Math.max(-1, Math.min(1, cosine))) * DEGREES_PER_RADIAN;
-  const column = angle < FINE_FROM_DEG ? angle / COARSE_DEG : COARSE + angle - FINE_FROM_DEG;
-  return Math.min(column, ANGLES - 1.000001);
+  if (angle >= SETTING_DEG) return Math.min(SETTING + angle - SETTING_DEG, ANGLES - 1.000001);
+  const j = angle < LOW_DEG ? Math.floor(angle / 20) : LOW + Math.floor((angle - LOW_DEG) / 3);
+  const [from, to] = [gridAngle(j), gridAngle(j + 1)].map((deg) => cos(deg * RADIANS_PER_DEGREE));
+  return j + Math.max(0, (from! - cosine) / (from! - to!));
+}
+
+/** Logarithm of a reference between columns j and j + 1 from those there: straight in the reference itself while the sun is high. */
+export function lnBetween(j: number, u: number, here: number, next: number): number {
+  return j < SETTING ? here + log(1 + u * expm1(next - here)) : here + u * (next - here);
 }
 
 /** The four grid points around a place: the first, then one column on, one row on, both on. */
@@ -66,9 +76,8 @@ export function findPlace(
   place.s01 = (1 - v) * u;
   place.s10 = v * (1 - u);
   place.s11 = v * u;
+  const next = node + ANGLES;
   place.ln =
-    place.s00 * lnReference[node]! +
-    place.s01 * lnReference[node + 1]! +
-    place.s10 * lnReference[node + ANGLES]! +
-    place.s11 * lnReference[node + ANGLES + 1]!;
+    (1 - v) * lnBetween(j, u, lnReference[node]!, lnReference[node + 1]!) +
+    v * lnBetween(j, u, lnReference[next]!, lnReference[next + 1]!);
 }

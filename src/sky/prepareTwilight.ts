@@ -45,7 +45,7 @@ const SIGHT_POINTS = 10;
  * Model: spherical shells, straight rays; molecules as in the US Standard Atmosphere 1976 (above 86 km falling on
  * exponentially), ozone with the column above height h in proportion to 1 / (1 + exp((h - 20 km) / 5 km)), both scaled to
  * the depths given; polarised Rayleigh scattering. Orders above the first: the tensor of the field is carried on a grid of
- * 16 heights and 34 sun angles, sunlight scattered once is gathered at each point, and successive orders are added until
+ * 16 heights and 38 sun angles, sunlight scattered once is gathered at each point, and successive orders are added until
  * one brings less than 1e-5; ground light is counted in all of them.
  * Validity: Rayleigh depth 1e-6 to 5, ozone depth 0 to 20. Refraction is left out: rays are straight.
  * Accuracy: single scattering 1e-4 against a brute-force sum; all orders against a Monte Carlo in shells: see `twilightStokes`.

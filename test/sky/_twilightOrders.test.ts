@@ -195,10 +195,18 @@ describe("light scattered again and again, against tensors in three dimensions",
       if (groundPath >= 0) {
         const cosine = dot(unit(along([0, 0, probe.radius], groundPath, sight)), sunward);
         const angle = (Math.acos(cosine) * 180) / Math.PI;
-        const real = angle < 84 ? angle / 12 : 7 + angle - 84;
-        const j = Math.floor(real);
-        const u = real - j;
-        const ln = (1 - u) * lnGround[j]! + u * lnGround[j + 1]! - lnReference[here]!;
+        const angles = Array.from({ length: ANGLES }, (_, k) => gridAngle(k));
+        const j = angles.filter((deg) => deg <= angle).length - 1;
+        const [from, to] = [gridAngle(j), gridAngle(j + 1)].map((deg) =>
+          Math.cos((deg * Math.PI) / 180),
+        );
+        const u = angle < 84 ? (from! - cosine) / (from! - to!) : angle - gridAngle(j);
+        const [lower, upper] = [lnGround[j]!, lnGround[j + 1]!];
+        const own =
+          angle < 84
+            ? Math.log((1 - u) * Math.exp(lower) + u * Math.exp(upper))
+            : (1 - u) * lower + u * upper;
+        const ln = own - lnReference[here]!;
         // irradiance 1 leaves as radiance albedo / π, half in each vibration
         const lit = (ALBEDO / (2 * Math.PI)) * fromGround * probe.solid * Math.exp(ln);
         meets(TENSORS + j, field((1 - u) * lit, (1 - u) * lit, 0, e1, e2));

@@ -182,31 +182,37 @@ describe("optical depths to the top", () => {
 });
 
 describe("the grid of heights and suns", () => {
-  it("covers 0 to 116 km, closer near the ground, and 0 to 110 degrees, closer in twilight", () => {
+  it("covers 0 to 116 km, closer near the ground, and 0 to 110 degrees, closer as the sun sinks", () => {
     expect(gridHeight(0)).toBe(0);
     expectAbsolute(gridHeight(HEIGHTS - 1), 116_000, 1e-9);
     expectAbsolute(gridHeight(5), 116_000 / 9, 1e-9);
-    expect([0, 1, 6, 7, 8, ANGLES - 1].map(gridAngle)).toEqual([0, 12, 72, 84, 85, 110]);
+    const angles = Array.from({ length: ANGLES }, (_, j) => gridAngle(j));
+    expect(angles.slice(0, 13)).toEqual([0, 20, 40, 60, 63, 66, 69, 72, 75, 78, 81, 84, 85]);
+    expect(angles.at(-1)).toBe(110);
     expect(NODES).toBe(HEIGHTS * ANGLES);
     expect(TENSORS).toBe(4 * NODES);
     expect(UNKNOWNS).toBe(TENSORS + ANGLES);
   });
   it("finds the place of every point again", () => {
-    const ln = Float64Array.from({ length: NODES }, (_, k) => k);
+    const ln = Float64Array.from({ length: NODES }, (_, k) => k / 10);
     const place = { node: 0, s00: 0, s01: 0, s10: 0, s11: 0, ln: 0 };
-    for (let i = 0; i < HEIGHTS - 1; i++) {
-      for (let j = 0; j < ANGLES - 1; j++) {
-        const cosine = (angle: number): number => Math.cos((angle * Math.PI) / 180);
-        expectAbsolute(gridColumn(cosine(gridAngle(j))), j, j === 0 ? 1e-8 : 1e-11);
-        const between = gridAngle(j) + 0.25 * (gridAngle(j + 1) - gridAngle(j));
+    const cosine = (angle: number): number => Math.cos((angle * Math.PI) / 180);
+    for (let j = 0; j < ANGLES - 1; j++) {
+      const [from, to] = [gridAngle(j), gridAngle(j + 1)];
+      expectAbsolute(gridColumn(cosine(from + 1e-9)), j, j === 0 ? 1e-8 : 1e-6);
+      // a quarter on: of the cosine while the sun is high, of the angle in twilight
+      const [here, next] = [cosine(from), cosine(to)];
+      const quarter = to <= 84 ? 0.75 * here + 0.25 * next : cosine(0.75 * from + 0.25 * to);
+      for (let i = 0; i < HEIGHTS - 1; i++) {
         const root = (i + 0.4) / (HEIGHTS - 1);
-        findPlace(116_000 * root * root, cosine(between), ln, place);
+        findPlace(116_000 * root * root, quarter, ln, place);
         expect(place.node).toBe(i * ANGLES + j);
         expectAbsolute(place.s00, 0.6 * 0.75, 1e-9);
         expectAbsolute(place.s01, 0.6 * 0.25, 1e-9);
         expectAbsolute(place.s10, 0.4 * 0.75, 1e-9);
         expectAbsolute(place.s11, 0.4 * 0.25, 1e-9);
-        expectAbsolute(place.ln, place.node + 0.25 + 0.4 * ANGLES, 1e-6);
+        const step = to <= 84 ? Math.log(0.75 + 0.25 * Math.exp(0.1)) : 0.025;
+        expectAbsolute(place.ln, 0.1 * (place.node + 0.4 * ANGLES) + step, 1e-9);
       }
     }
   });
