@@ -21,7 +21,8 @@ export function fallThroughZero(
 
 function bisect(f: (angleDeg: number) => number, positive: number, other: number): number {
   let [inside, outside] = [positive, other];
-  while (Math.abs(outside - inside) > 1e-9) {
+  // 30 halvings of half a degree
+  for (let n = 0; n < 30; n++) {
     const middle = 0.5 * (inside + outside);
     if (f(middle) > 0) inside = middle;
     else outside = middle;

@@ -71,6 +71,7 @@ describe("properties", () => {
 describe("edges", () => {
   it("wants a prepared record", () => {
     expectRefusal(() => airDensity({} as never), TypeError, "airDensity", "moistAir");
+    expectRefusal(() => airDensity(undefined as never), TypeError, "airDensity", "moistAir");
     expectRefusal(() => airNumberDensity(null as never), TypeError, "airNumberDensity", "moistAir");
   });
 });

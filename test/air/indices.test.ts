@@ -187,6 +187,7 @@ describe("edges", () => {
     }
     expectRefusal(() => index(0.5, humid), RangeError, "µm? multiply by 1000");
     expectRefusal(() => index(500, { pressurePa: 101325 } as never), TypeError, "moistAir");
+    expectRefusal(() => index(500, undefined as never), TypeError, "moistAir");
     expectRefusal(() => index("500" as never, humid), TypeError, name);
   });
   it("vacuumToAirWavelength and refractiveIndexPeckReeder", () => {

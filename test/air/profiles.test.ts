@@ -148,6 +148,21 @@ describe("independent fixtures", () => {
       const { waterMoleFraction } = moistAir({ ...row, co2Ppm: 450 });
       expectRelative(air.waterMoleFraction, waterMoleFraction, 1e-11);
     }
+    // temperature and vapour are straight in geopotential height between the rows
+    const geopotential = (z: number): number => (6_356_766 * z) / (6_356_766 + z);
+    const [low, high] = [rows[0]!, rows[1]!].map((row) => ({
+      ...moistAir({ ...row, co2Ppm: 450 }),
+      h: geopotential(row.heightM),
+      temperatureK: row.temperatureK,
+    }));
+    for (const heightM of [150, 300, 450]) {
+      const share = (geopotential(heightM) - low!.h) / (high!.h - low!.h);
+      const air = airAtHeight(heightM, profile);
+      const between = (a: number, b: number): number => a + share * (b - a);
+      expectRelative(air.temperatureK, between(low!.temperatureK, high!.temperatureK), 1e-12);
+      const vapour = between(low!.waterMoleFraction, high!.waterMoleFraction);
+      expectRelative(air.waterMoleFraction, vapour, 1e-11);
+    }
     expect(airAtHeight(1521, profile).waterMoleFraction).toBe(0);
   });
 });
@@ -281,6 +296,8 @@ describe("edges", () => {
       { heightM: 1000, density: 0.5 },
     ];
     expect(tabulatedLayer(rows).densities).toEqual([1, 0.5]);
+    expect(tabulatedLayer([{ heightM: -5, density: 0 }, ...rows]).densities[0]).toBe(0);
+    expectRefusal(() => tabulatedLayer([rows[0]!, rows[0]!]), RangeError, "rows[1].heightM");
     expectRefusal(() => tabulatedLayer([...rows].reverse()), RangeError, "rows[1].heightM");
     expectRefusal(() => tabulatedLayer(rows.slice(1)), RangeError, "at least 2");
     expectRefusal(

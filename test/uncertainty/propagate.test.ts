@@ -156,6 +156,17 @@ describe("properties", () => {
       }),
     );
   });
+  it("has nothing left where errors cancel", () => {
+    const x = { value: 1, standardUncertainty: 0.1 };
+    const apart = propagate(
+      ({ x: a, y: b }) => a - b,
+      { x, y: x },
+      {
+        correlations: [{ between: ["x", "y"], coefficient: 1 }],
+      },
+    );
+    expectAbsolute(apart.standardUncertainty, 0, 1e-7 * 0.1); // rounding of the variance, under the root
+  });
   it("scales with its result", () => {
     fc.assert(
       fc.property(spread, between(0.1, 50), (u, scale) => {
@@ -228,6 +239,12 @@ describe("edges", () => {
       );
       expect(mixed.degreesOfFreedom).toBeNaN();
     }
+    const known = propagate(
+      (v) => v.x + v.y,
+      { x: one.x, y: one.x },
+      { correlations: [{ between: ["x", "y"], coefficient: 0.5 }] },
+    );
+    expect(known.degreesOfFreedom).toBe(Number.POSITIVE_INFINITY);
     expectRelative(sum(0), 8, 1e-6);
     expect(propagate(({ x }) => x, one).degreesOfFreedom).toBe(Number.POSITIVE_INFINITY);
   });
