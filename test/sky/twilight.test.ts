@@ -294,6 +294,24 @@ describe("all orders", () => {
     expect(ratio(88, 0, 0)).toBeLessThan(0.7); // flat layers starve a low sun
   });
 
+  it("meets the flat layers over bright ground under a high sun, and is unpolarised overhead with the sun there", () => {
+    const flat = prepareSky({
+      layers: [{ rayleighDepth: 0.22, absorptionDepth: 0 }],
+      ...{ depolarisation: 0.0279, groundAlbedo: 0.8 },
+    });
+    const round = prepareTwilight({ ...blue, ozoneDepth: 0, groundAlbedo: 0.8, orders: "all" });
+    for (const sunZenithDeg of [0, 10]) {
+      for (const viewZenithDeg of [0, 30, 60]) {
+        const view = { viewZenithDeg, relativeAzimuthDeg: 40 };
+        const [i, q, u] = twilightStokes(round, { sunZenithDeg, ...view });
+        const lit = illuminateSky(flat, sunZenithDeg);
+        // 1.5 % where two thirds of the light are of higher orders: the grid's rays, five azimuths and 14 heights
+        expectRelative(i, skyStokes(lit, { ...view, at: "ground" })[0], 0.02);
+        if (sunZenithDeg + viewZenithDeg === 0) expectAbsolute(Math.hypot(q, u) / i, 0, 1e-6);
+      }
+    }
+  });
+
   it("gives what was computed elsewhere: orders over single scattering", () => {
     // sizes computed independently for 450 nm: 1.3 to 1.6 up to sunset, up to 26 at 94° near the horizon away from the sun
     const single = prepareTwilight({ ...blue, orders: "single" });
