@@ -1,10 +1,11 @@
 import { describe, expect, it } from "vitest";
 import { COMPONENTS, emission } from "../../src/sky/_emission.js";
+import { higherAlong } from "../../src/sky/_higherSight.js";
 import { addLater } from "../../src/sky/_laterField.js";
 import { gaussNodes } from "../../src/sky/_nodes.js";
 import type { Probe } from "../../src/sky/_probe.js";
 import { visitRays } from "../../src/sky/_probes.js";
-import { ray } from "../../src/sky/_rays.js";
+import { ray, sightRay } from "../../src/sky/_rays.js";
 import { shellAir } from "../../src/sky/_shellAir.js";
 import { slantTable, sunlightAt } from "../../src/sky/_slantDepth.js";
 import { addSunlit } from "../../src/sky/_sunlitField.js";
@@ -219,6 +220,44 @@ describe("light scattered again and again, against tensors in three dimensions",
       }
     }
     expect(kernel.every((value) => value === 0)).toBe(true);
+  });
+  it("a line of sight through the field of all orders", () => {
+    const lnReference = Float64Array.from({ length: NODES }, (_, k) => Math.sin(k));
+    const tensors = Float64Array.from({ length: TENSORS }, (_, k) => Math.cos(3 * k));
+    const nodes = gaussNodes(3);
+    for (const [column, view, azimuth] of [
+      [2, 0.7, 0.4],
+      [14, 0.03, 2],
+      [20, 0.95, -1],
+    ] as const) {
+      const { sunward, sight, e1, e2 } = probeOf(0, column, view, azimuth);
+      const cosines = { sun: sunward[2], view, between: dot(sight, sunward) };
+      const given = { ...cosines, theta: dot(e1, sunward), phi: dot(e2, sunward) };
+      const found = higherAlong(sky, { lnReference, tensors }, DIPOLE, given, nodes);
+      const { paths, heights, weights } = sightRay(sky, view, nodes, 0);
+      const place = { node: 0, s00: 0, s01: 0, s10: 0, s11: 0, ln: 0 };
+      const expected = [0, 0, 0];
+      paths.forEach((path, k) => {
+        const up = unit(along([0, 0, air.groundM], path, sight));
+        const x = unit(along(sunward, -dot(sunward, up), up));
+        findPlace(heights[k]!, dot(sunward, up), lnReference, place);
+        basis(x, cross(up, x), up).forEach((m, c) => {
+          const at = COMPONENTS * place.node + c;
+          const tensor =
+            place.s00 * tensors[at]! +
+            place.s01 * tensors[at + 4]! +
+            place.s10 * tensors[at + 4 * ANGLES]! +
+            place.s11 * tensors[at + 4 * ANGLES + 4]!;
+          const size = weights[k]! * Math.exp(place.ln) * tensor;
+          expected[0]! += size * sends(m, DIPOLE, e1, e1);
+          expected[1]! += size * sends(m, DIPOLE, e2, e2);
+          expected[2]! += size * sends(m, DIPOLE, e1, e2);
+        });
+      });
+      found.forEach((value, part) => {
+        expectAbsolute(value, expected[part]!, 1e-14);
+      });
+    }
   });
   it("rays from every point cover the sphere, and their vectors are square to each other", () => {
     const covered = new Float64Array(HEIGHTS * ANGLES);

@@ -164,4 +164,10 @@ export const SKY: readonly Equivalent[] = [
     literals: ["3"],
     why: "a longer array holds the same numbers",
   },
+  {
+    path: "src/sky/_fillRay.ts",
+    line: "const whole = ",
+    literals: ["0"],
+    why: "a millimetre of height or path, below 1e-9 of any depth",
+  },
 ];
