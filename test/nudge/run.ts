@@ -68,11 +68,10 @@ async function runJob(room: string, { tests, nudges }: Job): Promise<Outcome[]> 
   return outcomes;
 }
 
-/** The jobs for a room or a file, shared out so that every processor has something to do. */
-function jobsOf(name: string, shares: number): { room: string; job: Job }[] {
-  const room = name.replace(/^src\//, "").split("/")[0]!;
+/** The jobs for a room, or those of its files that are named, shared out so that every processor has something to do. */
+function jobsOf(room: string, shares: number): { room: string; job: Job }[] {
   const tests = existsSync(`${ROOT}test/${room}`) ? filesUnder(`test/${room}`, ".test.ts") : [];
-  const files = filesUnder(`src/${room}`, ".ts").filter((path) => name === room || path === name);
+  const files = filesUnder(`src/${room}`, ".ts").filter((path) => isWanted(room) || isWanted(path));
   const all = files.flatMap((path) => nudgesOf(path, args.includes("--guards")));
   const explained = all.filter((nudge) => reason(nudge) !== undefined);
   const nudges = args.includes("--explained")
@@ -82,6 +81,11 @@ function jobsOf(name: string, shares: number): { room: string; job: Job }[] {
   const size = Math.max(12, Math.ceil(nudges.length / shares));
   const starts = nudges.flatMap((_, i) => (i % size === 0 ? [i] : []));
   return starts.map((i) => ({ room, job: { tests, nudges: nudges.slice(i, i + size) } }));
+}
+
+/** True of a room or file that is named, and of everything if nothing is. */
+function isWanted(name: string): boolean {
+  return named.length === 0 || named.includes(name);
 }
 
 /** Why a change is right to go unnoticed, if somebody has said so. */
@@ -98,7 +102,7 @@ const named = args.filter((arg) => !arg.startsWith("--"));
 const used = new Set<Equivalent>();
 let skipped = 0;
 const processes = Math.max(1, Math.min(4, cpus().length));
-const queue = (named.length > 0 ? named : ROOMS).flatMap((name) => jobsOf(name, processes));
+const queue = ROOMS.flatMap((room) => jobsOf(room, processes));
 const outcomes: Outcome[] = [];
 await Promise.all(
   Array.from({ length: processes }, async () => {
