@@ -45,10 +45,10 @@ export function addLater(p: Probe, target: LaterTarget): void {
       const g = scale * parts[2 * COMPONENTS + c]!;
       const at = COMPONENTS * place.node + c;
       spreadTensor(kernel, tensor + at, place, p, a, b, g);
-      if (onGround > 0) spread(kernel, irradiance + at, place, onGround * (a + b));
+      if (onGround !== 0) spread(kernel, irradiance + at, place, onGround * (a + b));
     }
   }
-  if (p.ray.groundPath >= 0 && target.albedo > 0) addGround(p, target, tensor, lnHere);
+  if (p.ray.groundPath >= 0 && target.albedo !== 0) addGround(p, target, tensor, lnHere);
 }
 
 /** The same for the ground's diffuse light. */
