@@ -10,6 +10,8 @@ import type { Nodes } from "./_nodes.js";
 
 /** One azimuth mode on the nodes, before any layer is known. */
 export interface ModeKernel {
+  /** Azimuth order, 0 to 2. */
+  readonly order: 0 | 1 | 2;
   /** Number of source components: 2 in mode 0, else 1. */
   readonly rank: 1 | 2;
   /** Number of unknowns: nodes times rank, component by component. */
@@ -57,6 +59,7 @@ export function meanKernel(nodes: Nodes, dipole: number): ModeKernel {
     second[count + i] = root * b22;
   }
   return {
+    order: 0,
     rank: 2,
     size: 2 * count,
     secants,
@@ -79,5 +82,5 @@ export function wavyKernel(order: 1 | 2, nodes: Nodes, dipole: number): ModeKern
     secants[i] = 1 / nodes.cosines[i]!;
   }
   const second = new Float64Array(size);
-  return { rank: 1, size, secants, first, second, dipole, mixing: [1, 0, 0] };
+  return { order, rank: 1, size, secants, first, second, dipole, mixing: [1, 0, 0] };
 }

@@ -178,7 +178,7 @@ export const SKY: readonly Equivalent[] = [
   },
   {
     path: "src/sky/_kernel.ts",
-    line: "return { rank: 1",
+    line: "return { order, rank: 1",
     literals: ["0", "1"],
     why: "read of mode 0 alone",
   },
