@@ -236,4 +236,10 @@ export const SKY: readonly Equivalent[] = [
     literals: ["0", "6"],
     why: "where Newton's steps start and how many there may be, not where they end",
   },
+  {
+    path: "src/sky/_kernel.ts",
+    line: "order: 0",
+    literals: ["0"],
+    why: "compared with a whole number: anything between two of them does the same",
+  },
 ];
