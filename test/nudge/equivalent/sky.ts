@@ -242,4 +242,34 @@ export const SKY: readonly Equivalent[] = [
     literals: ["0"],
     why: "compared with a whole number: anything between two of them does the same",
   },
+  {
+    path: "src/sky/_outwardDepth.ts",
+    line: "const PANELS",
+    literals: ["60"],
+    why: "where the quadrature is cut and where the air ends: any near choice gives the depth within the 5e-5 tested",
+  },
+  {
+    path: "src/sky/_outwardDepth.ts",
+    line: "const GAUSS",
+    literals: ["0.28867513459481287"],
+    why: "where the quadrature is cut and where the air ends: any near choice gives the depth within the 5e-5 tested",
+  },
+  {
+    path: "src/sky/_outwardDepth.ts",
+    line: "const reach = ",
+    literals: ["2"],
+    why: "where the quadrature is cut and where the air ends: any near choice gives the depth within the 5e-5 tested",
+  },
+  {
+    path: "src/sky/_outwardDepth.ts",
+    line: "const step = 1",
+    literals: ["1"],
+    why: "where the quadrature is cut and where the air ends: any near choice gives the depth within the 5e-5 tested",
+  },
+  {
+    path: "src/sky/_outwardDepth.ts",
+    line: "const x = (0.5",
+    literals: ["0.25", "2"],
+    why: "where the quadrature is cut and where the air ends: any near choice gives the depth within the 5e-5 tested",
+  },
 ];
