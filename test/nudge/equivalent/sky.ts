@@ -434,4 +434,46 @@ export const SKY: readonly Equivalent[] = [
     literals: ["1"],
     why: "how fine the table is and where between its rows the cubic runs; the depth is held to 3e-4",
   },
+  {
+    path: "src/sky/_secular.ts",
+    line: "m === 0 ? -1",
+    literals: ["0", "1"],
+    why: "not looked at for the lowest root",
+  },
+  {
+    path: "src/sky/_secularRoot.ts",
+    line: "const SETTLED",
+    literals: ["1e-10"],
+    why: "the next step would be below rounding",
+  },
+  {
+    path: "src/sky/_secularRoot.ts",
+    line: "let width = 0",
+    literals: ["0"],
+    why: "where the bracket of the root lies and the first step starts, not where the steps end",
+  },
+  {
+    path: "src/sky/_secularRoot.ts",
+    line: "if (m > 0) width",
+    literals: ["0", "0.5"],
+    why: "where the bracket of the root lies and the first step starts, not where the steps end",
+  },
+  {
+    path: "src/sky/_secularRoot.ts",
+    line: "let high = ",
+    literals: ["0"],
+    why: "where the bracket of the root lies and the first step starts, not where the steps end",
+  },
+  {
+    path: "src/sky/_secularRoot.ts",
+    line: "let low = ",
+    literals: ["0"],
+    why: "where the bracket of the root lies and the first step starts, not where the steps end",
+  },
+  {
+    path: "src/sky/_secularRoot.ts",
+    line: "let shift = ",
+    literals: ["0.75"],
+    why: "where the bracket of the root lies and the first step starts, not where the steps end",
+  },
 ];
