@@ -57,6 +57,7 @@ async function runJob(room: string, { tests, nudges }: Job): Promise<Outcome[]> 
     const code = await new Promise<number | null>((resolve) => worker.on("close", resolve));
     clearTimeout(timer);
     if (broken !== "") {
+      console.error(`${room} cannot be tried: ${broken}`);
       unusable.push(`${room}: ${broken}`);
       return [];
     }
