@@ -22,7 +22,7 @@ export function nudgesOf(path: string, withGuards: boolean): Nudge[] {
   const tree = treeOf(path, text);
   const found: Nudge[] = [];
   walk(tree, (node) => {
-    if (!ts.isNumericLiteral(node) || ts.isLiteralTypeNode(node.parent)) return;
+    if (!ts.isNumericLiteral(node) || ancestors(node).some(ts.isTypeNode)) return;
     if (ts.isPropertyAssignment(node.parent) && node.parent.name === node) return;
     if (isInTable(node) || (!withGuards && isInGuard(node))) return;
     const [from, to] = [node.getStart(), node.getEnd()];
