@@ -1,7 +1,8 @@
 /** Layers put together by their reflection and transmission at the nodes (the adding method). */
-import { inverse, product } from "./_matrix.js";
+import { inverse, plus, product } from "./_matrix.js";
 import type { LayerModes } from "./_layerModes.js";
 import { responses } from "./_responses.js";
+import { zeros } from "./_zeros.js";
 
 /** A layer between what lies above and below it. All matrices act on the scaled fields at the nodes, row by row. */
 export interface Join {
@@ -19,7 +20,7 @@ export interface Join {
 export function joinLayers(layers: readonly LayerModes[], secants: Float64Array): Join[] {
   const size = secants.length;
   const joins: Join[] = [];
-  let below: Float64Array = new Float64Array(0);
+  let below: Float64Array = zeros(0);
   for (let l = layers.length - 1; l >= 0; l--) {
     const { reflection, transmission } = responses(layers[l]!, secants);
     const bounces = below.length > 0 ? allBounces(reflection, below, size) : below;
@@ -46,5 +47,5 @@ function pileReflection(
   if (below.length === 0) return reflection;
   const through = product(bounces, transmission, size);
   const back = product(product(transmission, below, size), through, size);
-  return reflection.map((own, i) => own + back[i]!);
+  return plus(reflection, 1, back);
 }

@@ -1,4 +1,5 @@
 /** Symmetric positive definite systems, row by row in flat arrays. */
+import { zeros } from "./_zeros.js";
 
 /** Lower Cholesky factor of `matrix` plus `diagonal`; its diagonal holds reciprocals. */
 export function choleskyFactor(
@@ -6,7 +7,7 @@ export function choleskyFactor(
   diagonal: Float64Array,
   size: number,
 ): Float64Array {
-  const factor = new Float64Array(size * size);
+  const factor = zeros(size * size);
   for (let i = 0; i < size; i++) {
     const row = i * size;
     for (let j = 0; j < i; j++) {

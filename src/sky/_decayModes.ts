@@ -2,6 +2,7 @@
 import type { ModeKernel } from "./_kernel.js";
 import { secondDowndate } from "./_secondDowndate.js";
 import { rankOneDowndate } from "./_secular.js";
+import { zeros } from "./_zeros.js";
 
 /** What the eigenproblem of a layer gives. */
 export interface DecayModes {
@@ -17,23 +18,23 @@ export function decayModes(kernel: ModeKernel, albedo: number): DecayModes {
   if (albedo === 0) return darkModes(secants);
   const count = size / rank;
   const scale = Math.sqrt(2 * albedo);
-  const poles = new Float64Array(count);
-  const vector = new Float64Array(count);
+  const poles = zeros(count);
+  const vector = zeros(count);
   for (let i = 0; i < count; i++) {
     poles[i] = secants[i]! * secants[i]!;
     vector[i] = scale * kernel.first[i]! * secants[i]!;
   }
   const { values, vectors, couplings } = rankOneDowndate(poles, vector);
   for (let i = 0; i < count; i++) couplings[i]! /= scale;
-  const once = { values, vectors, first: couplings, second: new Float64Array(count) };
+  const once = { values, vectors, first: couplings, second: zeros(count) };
   return rank === 1 ? once : secondDowndate(kernel, scale, poles, once);
 }
 
 /** Without scattering every node is a mode of its own, and what it would give a source does not matter. */
 function darkModes(secants: Float64Array): DecayModes {
   const size = secants.length;
-  const none = new Float64Array(size);
-  const vectors = new Float64Array(size * size);
+  const none = zeros(size);
+  const vectors = zeros(size * size);
   for (let i = 0; i < size; i++) vectors[i * size + i] = 1;
   return { values: secants.map((secant) => secant * secant), vectors, first: none, second: none };
 }

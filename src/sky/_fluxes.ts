@@ -2,6 +2,7 @@
 import { evenGlow, fieldFlux } from "./_ground.js";
 import type { Stack, StackField } from "./_stack.js";
 import { bottomField, topField } from "./_stackEnds.js";
+import { zeros } from "./_zeros.js";
 
 /** Diffuse fluxes at the boundaries, from the top down. */
 export interface DiffuseFluxes {
@@ -14,8 +15,8 @@ export function diffuseFluxes(stack: Stack, field: StackField): DiffuseFluxes {
   const count = stack.layers.length;
   const { secants } = stack.kernel;
   const glow = evenGlow(stack.kernel);
-  const down = new Float64Array(count + 1);
-  const up = new Float64Array(count + 1);
+  const down = zeros(count + 1);
+  const up = zeros(count + 1);
   for (let b = 1; b < count; b++) down[b] = fieldFlux(field.down[b]!, glow, secants);
   for (let b = 1; b <= count; b++) up[b] = fieldFlux(field.up[b - 1]!, glow, secants);
   if (count === 0) {

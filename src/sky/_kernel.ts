@@ -7,6 +7,7 @@
  * I_l = c² e cos(2 az), I_r = -e cos(2 az), U = -2 c e sin(2 az). Depolarisation mixes A and B and weakens d and e.
  */
 import type { Nodes } from "./_nodes.js";
+import { zeros } from "./_zeros.js";
 
 /** One azimuth mode on the nodes, before any layer is known. */
 export interface ModeKernel {
@@ -40,9 +41,9 @@ export function meanKernel(nodes: Nodes, dipole: number): ModeKernel {
   const c11 = Math.sqrt(0.5 * dipole + isotropic);
   const c21 = isotropic / c11;
   const c22 = Math.sqrt(dipole + isotropic - c21 * c21);
-  const secants = new Float64Array(2 * count);
-  const first = new Float64Array(2 * count);
-  const second = new Float64Array(2 * count);
+  const secants = zeros(2 * count);
+  const first = zeros(2 * count);
+  const second = zeros(2 * count);
   for (let i = 0; i < count; i++) {
     const c2 = nodes.cosines[i]! * nodes.cosines[i]!;
     const s2 = 1 - c2;
@@ -73,14 +74,14 @@ export function meanKernel(nodes: Nodes, dipole: number): ModeKernel {
 /** Modes 1 and 2: kernels 3/8 s² (1 + 2 c²) and 3/16 (1 + c²)², times the dipole share. */
 export function wavyKernel(order: 1 | 2, nodes: Nodes, dipole: number): ModeKernel {
   const size = nodes.cosines.length;
-  const first = new Float64Array(size);
-  const secants = new Float64Array(size);
+  const first = zeros(size);
+  const secants = zeros(size);
   for (let i = 0; i < size; i++) {
     const c2 = nodes.cosines[i]! * nodes.cosines[i]!;
     const kernel = order === 1 ? 0.375 * (1 - c2) * (1 + 2 * c2) : 0.1875 * (1 + c2) * (1 + c2);
     first[i] = Math.sqrt(dipole * nodes.weights[i]! * kernel);
     secants[i] = 1 / nodes.cosines[i]!;
   }
-  const second = new Float64Array(size);
+  const second = zeros(size);
   return { order, rank: 1, size, secants, first, second, dipole, mixing: [1, 0, 0] };
 }

@@ -3,6 +3,7 @@ import { expm1 } from "../_numeric.js";
 import { choleskyFactor } from "./_cholesky.js";
 import { decayModes } from "./_decayModes.js";
 import type { ModeKernel } from "./_kernel.js";
+import { zeros } from "./_zeros.js";
 
 /** Single-scattering albedos up to this count as none: what they scatter is below every stated accuracy. */
 const DARK = 1e-10;
@@ -36,9 +37,9 @@ export function layerModes(kernel: ModeKernel, depth: number, albedo: number): L
   const { size, secants } = kernel;
   const scattering = albedo > DARK ? albedo : 0;
   const { values, vectors, first, second } = decayModes(kernel, scattering);
-  const even = new Float64Array(size);
-  const odd = new Float64Array(size);
-  const squares = new Float64Array(size);
+  const even = zeros(size);
+  const odd = zeros(size);
+  const squares = zeros(size);
   for (let m = 0; m < size; m++) {
     squares[m] = Math.max(0, values[m]!);
     const k = Math.sqrt(squares[m]!);
@@ -64,8 +65,8 @@ export function layerModes(kernel: ModeKernel, depth: number, albedo: number): L
 /** Eigenvectors' overlaps weighted by 1 / cosine; the lower triangle is filled. */
 function secantMatrix(vectors: Float64Array, secants: Float64Array): Float64Array {
   const size = secants.length;
-  const matrix = new Float64Array(size * size);
-  const weighted = new Float64Array(size);
+  const matrix = zeros(size * size);
+  const weighted = zeros(size);
   for (let a = 0; a < size; a++) {
     for (let j = 0; j < size; j++) weighted[j] = vectors[a * size + j]! * secants[j]!;
     for (let b = 0; b <= a; b++) {

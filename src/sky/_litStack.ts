@@ -1,8 +1,10 @@
 /** One azimuth mode lit by the sun, in the form lines of sight are integrated from. */
+import { plus } from "./_matrix.js";
 import { exp } from "../_numeric.js";
 import type { LayerModes } from "./_layerModes.js";
 import { addBeam, type BeamSource, sunSource } from "./_sunBeam.js";
 import { type Amplitudes, darkSources, type Stack, type StackField, solveStack } from "./_stack.js";
+import { zeros } from "./_zeros.js";
 
 /** Source of one layer: its eigenmodes' amplitudes, albedo included, and what follows the beam. */
 export interface LitLayer extends Amplitudes {
@@ -32,7 +34,7 @@ export function litStack(stack: Stack, secants: readonly number[], cosine: numbe
       addBeam(layer, sources[l]!, beams[l]!.at(-1)!);
     }
   }
-  const field = solveStack(stack, sources, new Float64Array(stack.kernel.size));
+  const field = solveStack(stack, sources, zeros(stack.kernel.size));
   const layers = stack.layers.map((layer, l) => litLayer(layer, field.amplitudes[l]!, beams[l]!));
   return { stack, layers, field };
 }
@@ -40,8 +42,8 @@ export function litStack(stack: Stack, secants: readonly number[], cosine: numbe
 /** Sorts a solved layer by form: what the particular solution adds goes to the beams and is taken from the eigenmodes. */
 function litLayer(layer: LayerModes, solved: Amplitudes, beams: readonly BeamSource[]): LitLayer {
   const { albedo } = layer;
-  const even = solved.even.map((amplitude) => albedo * amplitude);
-  const odd = solved.odd.map((amplitude) => albedo * amplitude);
+  const even = plus(zeros(solved.even.length), albedo, solved.even);
+  const odd = plus(zeros(solved.odd.length), albedo, solved.odd);
   const all = beams.map((beam): BeamSource => {
     const { secant } = beam;
     const left = exp(-secant * layer.depth);
@@ -66,8 +68,8 @@ export function addGlow(lit: LitStack, glow: StackField, radiance: number): LitS
     const scale = radiance * lit.stack.layers[l]!.albedo;
     const { even, odd } = glow.amplitudes[l]!;
     return {
-      even: layer.even.map((own, m) => own + scale * even[m]!),
-      odd: layer.odd.map((own, m) => own + scale * odd[m]!),
+      even: plus(layer.even, scale, even),
+      odd: plus(layer.odd, scale, odd),
       beams: layer.beams,
     };
   });

@@ -1,15 +1,16 @@
 /** Square matrices in flat arrays, row by row. */
+import { copyOf, zeros } from "./_zeros.js";
 
 /** The unit matrix. */
 export function identity(size: number): Float64Array {
-  const matrix = new Float64Array(size * size);
+  const matrix = zeros(size * size);
   for (let i = 0; i < size; i++) matrix[i * size + i] = 1;
   return matrix;
 }
 
 /** Product of two matrices. */
 export function product(left: Float64Array, right: Float64Array, size: number): Float64Array {
-  const result = new Float64Array(size * size);
+  const result = zeros(size * size);
   for (let i = 0; i < size; i++) {
     for (let k = 0; k < size; k++) {
       const part = left[i * size + k]!;
@@ -26,7 +27,7 @@ export function apply(
   start?: Float64Array,
 ): Float64Array {
   const size = vector.length;
-  const result = new Float64Array(size);
+  const result = zeros(size);
   for (let i = 0; i < size; i++) {
     let sum = start === undefined ? 0 : start[i]!;
     for (let j = 0; j < size; j++) sum += matrix[i * size + j]! * vector[j]!;
@@ -40,7 +41,7 @@ export function apply(
  * Columns already eliminated are left as they are in `work`; those not yet reached are still zero in the result.
  */
 export function inverse(matrix: Float64Array, size: number): Float64Array {
-  const work = matrix.slice();
+  const work = copyOf(matrix);
   const result = identity(size);
   for (let p = 0; p < size; p++) {
     const pivot = p * size;
@@ -55,5 +56,12 @@ export function inverse(matrix: Float64Array, size: number): Float64Array {
       for (let j = 0; j <= p; j++) result[row + j]! -= part * result[pivot + j]!;
     }
   }
+  return result;
+}
+
+/** `left` plus `scale` times `right`, number by number. */
+export function plus(left: Float64Array, scale: number, right: Float64Array): Float64Array {
+  const result = copyOf(left);
+  for (let i = 0; i < result.length; i++) result[i]! += scale * right[i]!;
   return result;
 }

@@ -1,5 +1,6 @@
 /** How a layer answers light at its faces, from its eigenmodes. */
 import type { LayerModes } from "./_layerModes.js";
+import { copyOf, zeros } from "./_zeros.js";
 
 /** A layer's reflection and transmission: the sum and difference of its answers to even and odd illumination. */
 export function responses(
@@ -9,8 +10,8 @@ export function responses(
   const size = secants.length;
   const even = answer(layer.evenFactor, layer.vectors, secants);
   const odd = answer(layer.oddFactor, layer.vectors, secants);
-  const reflection = new Float64Array(size * size);
-  const transmission = new Float64Array(size * size);
+  const reflection = zeros(size * size);
+  const transmission = zeros(size * size);
   for (let i = 0; i < size * size; i++) {
     reflection[i] = even[i]! + odd[i]!;
     transmission[i] = even[i]! - odd[i]!;
@@ -22,7 +23,7 @@ export function responses(
 /** Secants times Z (factor factorᵀ)⁻¹ Zᵀ, Z the eigenvectors as columns. */
 function answer(factor: Float64Array, vectors: Float64Array, secants: Float64Array): Float64Array {
   const size = secants.length;
-  const half = vectors.slice(); // factor⁻¹ Zᵀ
+  const half = copyOf(vectors); // factor⁻¹ Zᵀ
   for (let m = 0; m < size; m++) {
     for (let k = 0; k < m; k++) {
       const part = factor[m * size + k]!;
@@ -31,7 +32,7 @@ function answer(factor: Float64Array, vectors: Float64Array, secants: Float64Arr
     const scale = factor[m * size + m]!;
     for (let j = 0; j < size; j++) half[m * size + j]! *= scale;
   }
-  const whole = new Float64Array(size * size);
+  const whole = zeros(size * size);
   for (let i = 0; i < size; i++) {
     for (let m = 0; m < size; m++) {
       const part = half[m * size + i]!;

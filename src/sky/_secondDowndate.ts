@@ -2,6 +2,7 @@
 import type { DecayModes } from "./_decayModes.js";
 import type { ModeKernel } from "./_kernel.js";
 import { type Eigensystem, rankOneDowndate } from "./_secular.js";
+import { zeros } from "./_zeros.js";
 
 /** The second outer product of mode 0, in the basis the first one left: its vectors, and the bare second components between them. */
 export function secondDowndate(
@@ -12,8 +13,8 @@ export function secondDowndate(
 ): DecayModes {
   const { size, secants } = kernel;
   const count = size / 2;
-  const poles = new Float64Array(size);
-  const vector = new Float64Array(size);
+  const poles = zeros(size);
+  const vector = zeros(size);
   for (let i = 0; i < count; i++) {
     poles[2 * i] = before.values[i]!;
     poles[2 * i + 1] = nodePoles[i]!;
@@ -32,9 +33,9 @@ function turnBack(before: DecayModes, after: Eigensystem, scale: number): DecayM
   const { values, vectors: turned, couplings } = after;
   const size = values.length;
   const count = size / 2;
-  const vectors = new Float64Array(size * size);
-  const first = new Float64Array(size);
-  const second = new Float64Array(size);
+  const vectors = zeros(size * size);
+  const first = zeros(size);
+  const second = zeros(size);
   for (let m = 0; m < size; m++) {
     const row = m * size;
     second[m] = couplings[m]! / scale;

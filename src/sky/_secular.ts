@@ -1,5 +1,6 @@
 /** Eigenvalues and eigenvectors of a diagonal matrix less one outer product, in a number of steps that grows as the square of its size. */
 import { reducedSecular, secularRoot } from "./_secularRoot.js";
+import { zeros } from "./_zeros.js";
 
 /** What `rankOneDowndate` finds. */
 export interface Eigensystem {
@@ -18,8 +19,8 @@ export interface Eigensystem {
  */
 export function rankOneDowndate(poles: Float64Array, vector: Float64Array): Eigensystem {
   const size = poles.length;
-  const values = new Float64Array(size);
-  const gaps = new Float64Array(size * size); // pole j less value m, at m * size + j
+  const values = zeros(size);
+  const gaps = zeros(size * size); // pole j less value m, at m * size + j
   for (let m = 0; m < size; m++) {
     const middle =
       m === 0 ? -1 : reducedSecular(poles, vector, m, m, 0.5 * (poles[m - 1]! - poles[m]!)).value;
@@ -29,7 +30,7 @@ export function rankOneDowndate(poles: Float64Array, vector: Float64Array): Eige
     for (let j = 0; j < size; j++) gaps[m * size + j] = poles[j]! - poles[origin]! - shift;
   }
   const exact = consistentVector(poles, gaps);
-  const couplings = new Float64Array(size);
+  const couplings = zeros(size);
   for (let m = 0; m < size; m++) {
     let square = 0;
     for (let j = 0; j < size; j++) {
@@ -50,7 +51,7 @@ export function rankOneDowndate(poles: Float64Array, vector: Float64Array): Eige
 /** The vector, without signs, of which the computed eigenvalues are exact. */
 function consistentVector(poles: Float64Array, gaps: Float64Array): Float64Array {
   const size = poles.length;
-  const exact = new Float64Array(size);
+  const exact = zeros(size);
   for (let j = 0; j < size; j++) {
     let square = gaps[j * size + j]!;
     for (let m = 0; m < size; m++) {

@@ -4,6 +4,7 @@ import type { ModeKernel } from "./_kernel.js";
 import type { LayerModes } from "./_layerModes.js";
 import { layerModes } from "./_layerModes.js";
 import { solveLayer, sweep } from "./_sweep.js";
+import { zeros } from "./_zeros.js";
 
 /** One azimuth mode of a prepared stack. */
 export interface Stack {
@@ -49,7 +50,7 @@ export function solveStack(
 ): StackField {
   const { layers, joins, kernel } = stack;
   const last = layers.length - 1;
-  const down: Float64Array[] = [new Float64Array(kernel.size)];
+  const down: Float64Array[] = [zeros(kernel.size)];
   const up: Float64Array[] = [];
   if (joins.length === 0) {
     up.push(fromBelow);
@@ -85,5 +86,5 @@ function addIncoming(
 /** Right-hand sides of layers without sources. */
 export function darkSources(stack: Stack): Amplitudes[] {
   const { size } = stack.kernel;
-  return stack.layers.map(() => ({ even: new Float64Array(size), odd: new Float64Array(size) }));
+  return stack.layers.map(() => ({ even: zeros(size), odd: zeros(size) }));
 }

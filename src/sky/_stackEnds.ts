@@ -1,5 +1,6 @@
 /** Fields at the two ends of a solved stack. */
 import type { Stack, StackField } from "./_stack.js";
+import { plus } from "./_matrix.js";
 import { leaving } from "./_sweep.js";
 
 /** Field that leaves the top of the stack. */
@@ -11,5 +12,5 @@ export function topField(stack: Stack, field: StackField): Float64Array {
 export function bottomField(stack: Stack, field: StackField): Float64Array {
   const last = stack.layers.length - 1;
   const total = leaving(stack.layers[last]!, field.amplitudes[last]!, -1, stack.kernel.secants);
-  return total.map((both, j) => both - field.up[last]![j]!);
+  return plus(total, -1, field.up[last]!);
 }

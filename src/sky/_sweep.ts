@@ -1,8 +1,9 @@
 /** The fields between the layers of a stack. */
 import { choleskySolve } from "./_cholesky.js";
 import type { LayerModes } from "./_layerModes.js";
-import { apply } from "./_matrix.js";
+import { apply, plus } from "./_matrix.js";
 import type { Amplitudes, Stack } from "./_stack.js";
+import { copyOf, zeros } from "./_zeros.js";
 
 /** Fields at the inner boundaries: from the bottom up what leaves each pile of layers, then down again what enters them. */
 export function sweep(
@@ -19,8 +20,8 @@ export function sweep(
   for (let l = layers.length - 1; l >= 0; l--) {
     const { reflection, transmission, below, bounces } = joins[l]!;
     const own = solveLayer(layers[l]!, {
-      even: sources[l]!.even.slice(),
-      odd: sources[l]!.odd.slice(),
+      even: copyOf(sources[l]!.even),
+      odd: copyOf(sources[l]!.odd),
     });
     let falling = apply(reflection, rising, leaving(layers[l]!, own, -1, kernel.secants));
     if (bounces.length > 0) falling = apply(bounces, falling);
@@ -33,7 +34,7 @@ export function sweep(
     const { transmission, below, bounces } = joins[l]!;
     let through = apply(transmission, down[l]!);
     if (bounces.length > 0) through = apply(bounces, through);
-    const falling = through.map((part, i) => part + lit[l]![i]!);
+    const falling = plus(through, 1, lit[l]!);
     if (l + 1 < layers.length) down.push(falling);
     up.push(below.length > 0 ? apply(below, falling, risen[l]!) : risen[l]!);
   }
@@ -54,7 +55,7 @@ export function leaving(
   secants: Float64Array,
 ): Float64Array {
   const size = secants.length;
-  const field = new Float64Array(size);
+  const field = zeros(size);
   for (let m = 0; m < size; m++) {
     const part = amplitudes.even[m]! + side * amplitudes.odd[m]!;
     for (let j = 0; j < size; j++) field[j]! += part * layer.vectors[m * size + j]!;

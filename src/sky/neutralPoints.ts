@@ -54,7 +54,7 @@ export function neutralPoints(lit: LitSky): NeutralPoints {
   const q = (signedZenith: Degrees): number =>
     skyStokes(lit, {
       viewZenithDeg: Math.abs(signedZenith),
-      relativeAzimuthDeg: signedZenith < 0 ? 180 : 0,
+      relativeAzimuthDeg: azimuthOf(signedZenith),
       at: "ground",
     })[1];
   const point = (signedZenith: number | undefined, from: Degrees): NeutralPoint | undefined =>
@@ -62,7 +62,7 @@ export function neutralPoints(lit: LitSky): NeutralPoints {
       ? undefined
       : {
           viewZenithDeg: Math.abs(signedZenith),
-          relativeAzimuthDeg: signedZenith < 0 ? 180 : 0,
+          relativeAzimuthDeg: azimuthOf(signedZenith),
           distanceDeg: Math.abs(signedZenith - from),
         };
   return {
@@ -70,4 +70,10 @@ export function neutralPoints(lit: LitSky): NeutralPoints {
     brewster: point(fallThroughZero(q, sun, LOWEST), sun),
     arago: point(fallThroughZero(q, -LOWEST, sun), sun - 180),
   };
+}
+
+/** Azimuth from the sun's of a place on the sun's vertical circle, whose zenith angle is below 0 on the other side. */
+function azimuthOf(signedZenith: Degrees): 0 | 180 {
+  if (signedZenith < 0) return 180;
+  return 0;
 }

@@ -122,35 +122,38 @@ describe("light scattered again and again, against tensors in three dimensions",
       });
     }
   });
-  it.each(CASES)("sunlight that one ray brings: row %d, sun %d", (row, column, view, azimuth) => {
-    const { probe, sunward, sight, e1, e2 } = probeOf(row, column, view, azimuth);
-    const out = new Float64Array(UNKNOWNS);
-    addSunlit(sky, probe, DIPOLE, ALBEDO, out);
-    // a beam of flux π, unpolarised
-    const beam = times(Math.PI / 2, sum(UNIT, times(-1, outer(sunward, sunward))));
-    const at = (path: number): Vector => along([0, 0, probe.radius], path, sight);
-    const cosineAt = (path: number): number => dot(unit(at(path)), sunward);
-    const { paths, heights, weights, groundPath, fromGround } = probe.ray;
-    const light = paths.reduce(
-      (s, path, k) => s + weights[k]! * sunlightAt(sky.table, heights[k]!, cosineAt(path)),
-      0,
-    );
-    const [a, b, g] = [
-      sends(beam, DIPOLE, e1, e1),
-      sends(beam, DIPOLE, e2, e2),
-      sends(beam, DIPOLE, e1, e2),
-    ];
-    let met = times(light, field(a, b, g, e1, e2));
-    const low = groundPath >= 0 ? Math.max(0, cosineAt(groundPath)) : 0;
-    // the ground's radiance: albedo times irradiance over π, half in each vibration
-    const lit = (ALBEDO / 2) * low * (low > 0 ? sunlightAt(sky.table, 0, low) : 0) * fromGround;
-    met = times(probe.solid, sum(met, field(lit, lit, 0, e1, e2)));
-    kept(met).forEach((value, c) => {
-      expectAbsolute(out[COMPONENTS * (row * ANGLES + column) + c]!, value, 1e-13);
-    });
-    expectAbsolute(out[TENSORS + column]!, row === 0 ? view * trace(met) : 0, 1e-13);
-    expect(trace(met)).toBeGreaterThan(1e-4);
-  });
+  it.each(CASES.flatMap((each) => [[ALBEDO, ...each] as const, [0, ...each] as const]))(
+    "sunlight that one ray brings over ground of albedo %d: row %d, sun %d",
+    (albedo, row, column, view, azimuth) => {
+      const { probe, sunward, sight, e1, e2 } = probeOf(row, column, view, azimuth);
+      const out = new Float64Array(UNKNOWNS);
+      addSunlit(sky, probe, DIPOLE, albedo, out);
+      // a beam of flux π, unpolarised
+      const beam = times(Math.PI / 2, sum(UNIT, times(-1, outer(sunward, sunward))));
+      const at = (path: number): Vector => along([0, 0, probe.radius], path, sight);
+      const cosineAt = (path: number): number => dot(unit(at(path)), sunward);
+      const { paths, heights, weights, groundPath, fromGround } = probe.ray;
+      const light = paths.reduce(
+        (s, path, k) => s + weights[k]! * sunlightAt(sky.table, heights[k]!, cosineAt(path)),
+        0,
+      );
+      const [a, b, g] = [
+        sends(beam, DIPOLE, e1, e1),
+        sends(beam, DIPOLE, e2, e2),
+        sends(beam, DIPOLE, e1, e2),
+      ];
+      let met = times(light, field(a, b, g, e1, e2));
+      const low = groundPath >= 0 ? Math.max(0, cosineAt(groundPath)) : 0;
+      // the ground's radiance: albedo times irradiance over π, half in each vibration
+      const lit = (albedo / 2) * low * (low > 0 ? sunlightAt(sky.table, 0, low) : 0) * fromGround;
+      met = times(probe.solid, sum(met, field(lit, lit, 0, e1, e2)));
+      kept(met).forEach((value, c) => {
+        expectAbsolute(out[COMPONENTS * (row * ANGLES + column) + c]!, value, 1e-13);
+      });
+      expectAbsolute(out[TENSORS + column]!, row === 0 ? view * trace(met) : 0, 1e-13);
+      expect(trace(met)).toBeGreaterThan(1e-4);
+    },
+  );
   it("light of every order that one ray brings", () => {
     const kernel = new Float64Array(UNKNOWNS * UNKNOWNS);
     const lnReference = Float64Array.from({ length: NODES }, (_, k) => Math.sin(k));

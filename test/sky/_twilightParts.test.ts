@@ -79,6 +79,18 @@ describe("air in shells", () => {
       expectAbsolute(integral(ozone, from, to, 400), (0.02 * part) / all, 1e-6);
     }
   });
+  it("holds nothing but ozone where there are no molecules: to the last digits the depth asked for, and its shape", () => {
+    const bare = shellAir(1e-14, 0.02, ALTITUDE_M);
+    const ozone = (heightM: number): number => coefficientAt(bare.lnExtinction, heightM);
+    // near the layer's middle neighbours alike to 1e-3 are averaged: 1e-6 / 12 of a twentieth of it
+    expectRelative(integral(ozone, 0, 120_000, 2400), 0.02, 1e-8);
+    const slope = (heightM: number): number => {
+      const x = Math.exp((heightM + ALTITUDE_M - 20_000) / 5000);
+      return x / ((1 + x) * (1 + x));
+    };
+    for (const heightM of [0, 8000, 19_500, 33_300])
+      expectRelative(ozone(heightM) / ozone(12_000), slope(heightM) / slope(12_000), 1e-9);
+  });
   it("is read off between steps along straight logarithms, and held at its ends", () => {
     const table = Float64Array.of(0, 1, 3);
     expectRelative(coefficientAt(table, 150), Math.exp(2), 1e-15);

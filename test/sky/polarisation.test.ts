@@ -143,6 +143,25 @@ describe("neutral points", () => {
     expect(distances[2]! / distances[3]!).toBeLessThan(Math.sqrt(3));
   });
 
+  it("give their directions, and their angles from the sun, Arago's from the point opposite", () => {
+    for (const [sun, names] of [
+      [85, ["babinet", "arago"]],
+      [40, ["babinet", "brewster"]],
+    ] as const) {
+      const points = neutralPoints(litSky(0.15, sun));
+      const low = (sun * Math.PI) / 180;
+      for (const name of names) {
+        const { viewZenithDeg, relativeAzimuthDeg, distanceDeg } = points[name]!;
+        expect([0, 180]).toContain(relativeAzimuthDeg);
+        const zenith = (viewZenithDeg * Math.PI) / 180;
+        const side = Math.sin(zenith) * (relativeAzimuthDeg === 0 ? 1 : -1);
+        const cosine = side * Math.sin(low) + Math.cos(zenith) * Math.cos(low);
+        const away = (Math.acos(name === "arago" ? -cosine : cosine) * 180) / Math.PI;
+        expectAbsolute(distanceDeg, away, 1e-9);
+      }
+    }
+  });
+
   it("merge in the zenith with the sun there", () => {
     const near = neutralPoints(litSky(0.2, 1));
     expect(near.babinet!.distanceDeg).toBeLessThan(1);
