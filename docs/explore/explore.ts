@@ -5,6 +5,7 @@ import { drawScene } from "./drawScene.js";
 import { drawSpectrum } from "./drawSpectrum.js";
 import { numbersOf } from "./numbersOf.js";
 import { prepareArc } from "./skyArc.js";
+import { writeTexts } from "./writeTexts.js";
 
 const NAMES = ["heightDeg", "altitudeM", "ozoneDu", "haze", "co2Ppm"] as const;
 const UNITS: Readonly<Record<(typeof NAMES)[number], string>> = {
@@ -25,6 +26,7 @@ function readState(): State {
 
 let skies = prepareArc(readState());
 let skiesFor = "";
+let code = "";
 
 /** The prepared sky of the state's air; the sun and the haze do not change it. */
 function skiesOf(state: State): typeof skies {
@@ -45,15 +47,9 @@ function update(): void {
   }
   drawScene(element("#scene"), state, view);
   drawSpectrum(element("#spectrum"), fixed.outside, view.ground);
-  const rows = numbersOf(view).flatMap(([term, value]) => [cell("dt", term), cell("dd", value)]);
-  element("#numbers").replaceChildren(...rows);
-  element<HTMLTextAreaElement>("#code").value = codeFor(state, view);
-}
-
-function cell(tag: "dt" | "dd", text: string): HTMLElement {
-  const made = document.createElement(tag);
-  made.textContent = text;
-  return made;
+  writeTexts(element("#numbers"), numbersOf(view).flat(), (i) => (i % 2 === 0 ? "dt" : "dd"));
+  code = codeFor(state, view);
+  writeTexts(element("#code"), code.split(/(?<=\n)/), () => "div");
 }
 
 /** Sliders from the address (#heightDeg=5&haze=0.2), so that a state can be passed on. */
@@ -85,13 +81,11 @@ addEventListener("hashchange", () => {
   update();
 });
 element("#copy").addEventListener("click", async () => {
-  const code = element<HTMLTextAreaElement>("#code");
   try {
-    await navigator.clipboard.writeText(code.value);
+    await navigator.clipboard.writeText(code);
     element("#copied").textContent = "copied";
   } catch {
-    code.focus();
-    code.select(); // no clipboard here: one key is left to press
+    getSelection()?.selectAllChildren(element("#code")); // no clipboard here: one key is left to press
     element("#copied").textContent = "selected: copy it with Ctrl C";
   }
 });
