@@ -96,7 +96,7 @@ function isCounter(node: ts.Node): boolean {
     if (ts.isForStatement(parent)) return parent.statement !== at;
     if (ts.isNewExpression(parent)) return true;
     if (ts.isCallExpression(parent))
-      return /\.(at|slice|subarray|toFixed|toPrecision|toString|padStart|imul)$/.test(
+      return /^zeros$|\.(at|slice|subarray|toFixed|toPrecision|toString|padStart|imul)$/.test(
         parent.expression.getText(),
       );
     if (ts.isBinaryExpression(parent)) {
