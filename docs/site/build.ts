@@ -12,6 +12,7 @@ import { writeExplorePage } from "./explorePage.js";
 import { pageBlocks, withPictures, writePage } from "./pages.js";
 import { attachSite } from "./plugin.js";
 import { quantitiesPage } from "./quantities.js";
+import { attachSearch, usesOf } from "./search.js";
 import { packagesOf, scriptsOf, writeModules } from "./runnable.js";
 import { sourcesPage } from "./sources.js";
 
@@ -51,6 +52,7 @@ const app = await Application.bootstrapWithPlugins({ options: `${ROOT}.config/ty
 // without its options TypeDoc would write, and first empty, another folder
 if (app.logger.hasErrors() || `${app.options.getValue("out")}/` !== OUT) process.exit(1);
 attachSite(app);
+attachSearch(app, usesOf(allBlocks()));
 const project = await app.convert();
 if (project === undefined) process.exit(1);
 app.validate(project);

@@ -11,6 +11,9 @@ import { launchBrowser } from "../site/_site.js";
 const CHANGES = 500;
 const PROMISE_MS = 16;
 
+/** How long a reader looks at the page before the first change. */
+const READING_MS = 1500;
+
 /** In the page: moves the sliders in turn, forces layout after each change, and returns the milliseconds. */
 function measure(changes: number): number[] {
   const sliders = [...document.querySelectorAll<HTMLInputElement>("input[type=range]")];
@@ -33,6 +36,7 @@ if (CHROMIUM === undefined) {
   const browser = await launchBrowser();
   const page = await browser.newPage();
   await page.goto(pathToFileURL(`${folder}explore.html`).href);
+  await page.waitForTimeout(READING_MS);
   const times = (await page.evaluate(measure, CHANGES)).sort((a, b) => a - b);
   await browser.close();
   const at = (share: number): number => times[Math.floor(share * (CHANGES - 1))]!;

@@ -121,6 +121,32 @@ describe.skipIf(CHROMIUM === undefined)("the documentation in Chromium", () => {
     await page.close();
   });
 
+  it("finds functions by name, and by the words people look for", async () => {
+    const page = await browser.newPage();
+    await open(page, `${address}index.html`);
+    await page.locator("#tsd-search-trigger").click();
+    const expectFirst = async (words: string, found: string): Promise<void> => {
+      await page.locator("#tsd-search-input").fill(words);
+      const results = page.locator("#tsd-search-results a");
+      await expect.poll(async () => (await results.allTextContents())[0]?.trim()).toBe(found);
+    };
+    const functions = pagePaths().flatMap(
+      (path) => /^functions\/(\w+\.\w+)\.html$/.exec(path)?.[1] ?? [],
+    );
+    expect(functions.length).toBeGreaterThan(100);
+    for (let i = 0; i < functions.length; i += 3)
+      await expectFirst(functions[i]!.split(".")[1]!, functions[i]!);
+    for (const [words, found] of [
+      ["air mass", "path.airMassYoung"],
+      ["spectrum", "colour.spectrumToXyz"],
+      ["refractive index", "air.refractiveIndexCiddor"],
+      ["photometer", "Correct a photometer"],
+      ["sunset", "How red is this sunset"],
+    ] as const)
+      await expectFirst(words, found);
+    await page.close();
+  });
+
   it.each([
     ["desktop", { viewport: { width: 1280, height: 900 } }],
     ["phone", devices["Pixel 5"] ?? {}],
