@@ -1,6 +1,6 @@
 /** The code that produces the state shown on the explore page, for copying. */
 import type { State, View } from "./compute.js";
-import { GROUND_ALBEDO } from "./skyArc.js";
+import { GROUND_ALBEDO, SKY_STEP_NM } from "./skyArc.js";
 
 /** The lines about the sky overhead. */
 function skyCode({ heightDeg, ozoneDu, co2Ppm }: State, view: View): string {
@@ -15,7 +15,7 @@ const overhead = tabulate((nm) => {
   const sky = prepareSky({ layers, depolarisation: depolarisation(nm, ${co2Ppm}), groundAlbedo: ${GROUND_ALBEDO}, streams: 16 });
   const up = { viewZenithDeg: 0, relativeAzimuthDeg: 0, at: "ground" };
   return skyRadiance(illuminateSky(sky, 90 - ${heightDeg}), up, solarIrradiance(nm));
-}, wavelengthGrid(400, 700, 20));
+}, wavelengthGrid(400, 700, ${SKY_STEP_NM}));
 const [zenithX, zenithY, zenithZ] = spectrumToXyz(overhead, cie1931Observer5nm);
 zenithY; // => ${view.zenithLuminance.toPrecision(5)}
 srgbHex(encodeSrgb(fitToDisplay(xyzToLinearSrgb([zenithX / zenithY, 1, zenithZ / zenithY])))); // => "${view.zenithColour}"

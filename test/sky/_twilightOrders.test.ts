@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import { COMPONENTS, emission } from "../../src/sky/_emission.js";
 import { higherAlong } from "../../src/sky/_higherSight.js";
 import { addLater } from "../../src/sky/_laterField.js";
+import { higherOrders } from "../../src/sky/_higherOrders.js";
 import { gaussNodes } from "../../src/sky/_nodes.js";
 import type { Probe } from "../../src/sky/_probe.js";
 import { visitRays } from "../../src/sky/_probes.js";
@@ -286,5 +287,17 @@ describe("light scattered again and again, against tensors in three dimensions",
     });
     expect(worst).toBeLessThan(1e-14);
     for (const solid of covered) expectRelative(solid, 4 * Math.PI, 1e-13);
+  });
+});
+
+describe("all orders together", () => {
+  it("prefer no azimuth under a sun overhead, at any height", () => {
+    const { tensors } = higherOrders(sky, DIPOLE, ALBEDO);
+    for (let row = 0; row < HEIGHTS; row++) {
+      const [xx, yy, zz, xz] = tensors.subarray(COMPONENTS * row * ANGLES) as unknown as Matrix;
+      expectRelative(xx!, yy!, 1e-12);
+      expectAbsolute(xz!, 0, 1e-12);
+      expect(zz).toBeGreaterThan(0);
+    }
   });
 });

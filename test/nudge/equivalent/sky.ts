@@ -88,7 +88,7 @@ export const SKY: readonly Equivalent[] = [
   },
   {
     path: "src/sky/_fluxes.ts",
-    line: "new Float64Array(count + 1)",
+    line: "zeros(count + 1)",
     literals: ["1"],
     why: "a longer array holds the same numbers",
   },
@@ -172,7 +172,7 @@ export const SKY: readonly Equivalent[] = [
   },
   {
     path: "src/sky/_kernel.ts",
-    line: "const second = new Float64Array(2 * count)",
+    line: "= zeros(2 * count)",
     literals: ["2"],
     why: "a longer array holds the same numbers",
   },
