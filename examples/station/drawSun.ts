@@ -21,7 +21,7 @@ export function drawSpectra(
   const labels = views.map(({ spectrum, trueHeightDeg }, k) => {
     const value = Math.max(...spectrum.values);
     const nm = spectrum.wavelengthsNm[spectrum.values.indexOf(value)]!;
-    return { nm, value, label: `${trueHeightDeg}°`, colour: lineColour(count - 1 - k, count) };
+    return { nm, value, label: `${trueHeightDeg}°`, colour: lineColour(k, count) };
   });
   const top = Math.max(...outside);
   const peak = grid[outside.indexOf(top)]!;
@@ -56,7 +56,7 @@ export function drawSpectra(
         line(toPoints(spectrum.wavelengthsNm, spectrum.values), {
           x: "nm",
           y: "value",
-          stroke: lineColour(count - 1 - k, count),
+          stroke: lineColour(k, count),
           strokeWidth: 1.4,
         }),
       ),
