@@ -1,5 +1,5 @@
 /** Wavelength in air to vacuum wavelength. */
-import { checkNumber } from "../_check.js";
+import { checkNumber, checkPrepared } from "../_check.js";
 import type { Nanometres } from "../units.js";
 import type { MoistAir } from "./moistAir.js";
 import { refractiveIndexCiddor } from "./refractiveIndexCiddor.js";
@@ -26,6 +26,7 @@ const ROUNDS = 4;
  */
 export function airToVacuumWavelength(airWavelengthNm: Nanometres, air: MoistAir): Nanometres {
   checkNumber(airWavelengthNm, 300, 1688, "nm", "airWavelengthNm", "airToVacuumWavelength");
+  checkPrepared(air?.dryFactor, "moistAir", "air", "airToVacuumWavelength");
   let vacuumNm = airWavelengthNm;
   for (let i = 0; i < ROUNDS; i++)
     vacuumNm = airWavelengthNm * refractiveIndexCiddor(vacuumNm, air);

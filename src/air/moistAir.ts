@@ -1,10 +1,6 @@
 /** The state of moist air at a point, with everything that does not depend on wavelength worked out once. */
-import { checkNumber, checkRecord, refuse } from "../_check.js";
 import type { Fraction, Kelvins, PartsPerMillion, Pascals } from "../units.js";
-import { ciddorFactors } from "./_ciddorDensity.js";
-import { compressibility } from "./_compressibility.js";
-import { enhancementFactor } from "./_enhancementFactor.js";
-import { saturationVapourPressure } from "./_saturationVapourPressure.js";
+import { moistState } from "./_moistState.js";
 
 /** What `moistAir` takes: the state as a weather station reports it. */
 export interface MoistAirInput {
@@ -53,28 +49,5 @@ export interface MoistAir extends MoistAirInput {
  * air.vapourPressurePa; // => 1174.3
  */
 export function moistAir(state: MoistAirInput): MoistAir {
-  checkRecord(state, "state", "moistAir");
-  const { pressurePa, temperatureK, relativeHumidity, co2Ppm } = state;
-  checkNumber(pressurePa, 10_000, 140_000, "Pa", "pressurePa", "moistAir");
-  checkNumber(temperatureK, 180, 380, "K", "temperatureK", "moistAir");
-  checkNumber(relativeHumidity, 0, 1, "fraction", "relativeHumidity", "moistAir");
-  checkNumber(co2Ppm, 0, 2000, "ppm", "co2Ppm", "moistAir");
-  const saturated =
-    enhancementFactor(pressurePa, temperatureK) * saturationVapourPressure(temperatureK);
-  const vapourPressurePa = relativeHumidity * saturated;
-  if (vapourPressurePa > pressurePa) {
-    const most = `0 to ${pressurePa / saturated} at ${temperatureK} K and ${pressurePa} Pa (more would boil)`;
-    refuse(relativeHumidity, most, "", "relativeHumidity", "moistAir");
-  }
-  const waterMoleFraction = vapourPressurePa / pressurePa;
-  return {
-    pressurePa,
-    temperatureK,
-    relativeHumidity,
-    co2Ppm,
-    waterMoleFraction,
-    vapourPressurePa,
-    compressibility: compressibility(pressurePa, temperatureK, waterMoleFraction),
-    ...ciddorFactors(pressurePa, temperatureK, waterMoleFraction, co2Ppm),
-  };
+  return moistState(state, "state", "moistAir");
 }

@@ -1,11 +1,12 @@
 /** The standard atmosphere made to pass through a station's readings. */
 import { checkNumber } from "../_check.js";
 import type { Metres } from "../units.js";
+import { moistState } from "./_moistState.js";
 import { raisedStandard } from "./_raisedStandard.js";
 import { geopotentialHeight, standardMolecularTemperature } from "./_standardLayers.js";
 import { vapourScale } from "./_vapourScale.js";
 import type { AirProfile } from "./airProfile.js";
-import { type MoistAirInput, moistAir } from "./moistAir.js";
+import type { MoistAirInput } from "./moistAir.js";
 
 /** What `standardProfile` takes: the surface state at the station. */
 export interface StandardProfileInput extends MoistAirInput {
@@ -43,7 +44,7 @@ export interface StandardProfileInput extends MoistAirInput {
  * airAtHeight(5000, profile).pressurePa; // => 55968
  */
 export function standardProfile(station: StandardProfileInput): AirProfile {
-  const air = moistAir(station);
+  const air = moistState(station, "station", "standardProfile");
   const { altitudeM } = station;
   checkNumber(altitudeM, -1000, 20_000, "m", "altitudeM", "standardProfile");
   const waterOriginM = geopotentialHeight(altitudeM);

@@ -1,4 +1,5 @@
 /** Vacuum wavelength to wavelength in air. */
+import { checkNumber, checkPrepared } from "../_check.js";
 import type { Nanometres } from "../units.js";
 import type { MoistAir } from "./moistAir.js";
 import { refractiveIndexCiddor } from "./refractiveIndexCiddor.js";
@@ -21,5 +22,7 @@ import { refractiveIndexCiddor } from "./refractiveIndexCiddor.js";
  * vacuumToAirWavelength(500, air); // => 499.86055
  */
 export function vacuumToAirWavelength(wavelengthNm: Nanometres, air: MoistAir): Nanometres {
+  checkNumber(wavelengthNm, 300, 1690, "nm", "wavelengthNm", "vacuumToAirWavelength");
+  checkPrepared(air?.dryFactor, "moistAir", "air", "vacuumToAirWavelength");
   return wavelengthNm / refractiveIndexCiddor(wavelengthNm, air);
 }

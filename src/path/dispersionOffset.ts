@@ -1,8 +1,9 @@
 /** The shift of a wavelength along and across a slit. */
-import { checkNumber, checkRecord } from "../_check.js";
+import { checkNumber } from "../_check.js";
 import { cos, sin } from "../_numeric.js";
 import { type Arcseconds, type Degrees, type Nanometres, RADIANS_PER_DEGREE } from "../units.js";
-import { type DispersionInput, differentialRefraction } from "./differentialRefraction.js";
+import type { DispersionInput } from "./differentialRefraction.js";
+import { liftOf } from "./_liftOf.js";
 
 /**
  * Where the light of a wavelength falls against that of the guiding wavelength, as a vector on the sky.
@@ -42,9 +43,8 @@ export function dispersionOffset(
   star: DispersionInput,
   zenithAngleDeg: Degrees,
 ): [along: Arcseconds, across: Arcseconds] {
-  checkRecord(star, "star", "dispersionOffset");
   checkNumber(zenithAngleDeg, -360, 360, "degrees", "zenithAngleDeg", "dispersionOffset");
-  const lift = differentialRefraction(wavelengthNm, star);
+  const lift = liftOf(wavelengthNm, star, "dispersionOffset");
   const angle = zenithAngleDeg * RADIANS_PER_DEGREE;
   return [lift * cos(angle), lift * sin(angle)];
 }

@@ -50,6 +50,7 @@ function checkSettings(settings: ArchiveSettings, channels: number): void {
   );
   checkUncertainty(settings.ozoneStandardUncertaintyDu, "ozoneStandardUncertaintyDu", NAME);
   checkUncertainty(settings.zenithStandardUncertaintyDeg, "zenithStandardUncertaintyDeg", NAME);
+  checkNumber(settings.windowMinutes, 0.1, 120, "minutes", "windowMinutes", NAME);
   checkNumber(settings.screeningChannel, 0, channels - 1, "", "screeningChannel", NAME);
   if (Number.isInteger(settings.screeningChannel)) return;
   throw new RangeError(

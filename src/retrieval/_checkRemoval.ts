@@ -1,5 +1,6 @@
 /** The checks of `removeAtmosphere`. */
-import { checkList, checkNumber, checkRecord, refuse } from "../_check.js";
+import { checkFunction, checkList, checkNumber, checkPrepared, checkRecord } from "../_check.js";
+import type { Beam } from "../beam/beam.js";
 import { checkSpectrum } from "../spectrum/_checkSpectrum.js";
 import type { Spectrum } from "../spectrum/spectrum.js";
 import { checkUncertainty } from "./_checkPositive.js";
@@ -8,8 +9,9 @@ import type { RemovalOptions } from "./removeAtmosphere.js";
 const NAME = "removeAtmosphere";
 
 /** Throws unless spectrum and options are sound and of one length. */
-export function checkRemoval(spectrum: Spectrum, options: RemovalOptions): void {
+export function checkRemoval(spectrum: Spectrum, beam: Beam, options: RemovalOptions): void {
   checkSpectrum(spectrum, "spectrum", NAME);
+  checkPrepared(beam?.pressureAirMass, "clearBeam", "beam", NAME);
   checkRecord(options, "options", NAME);
   const { standardUncertainties, slantDepthUncertainties, leastTransmittance } = options;
   checkList(standardUncertainties, 0, "standardUncertainties", NAME);
@@ -26,9 +28,7 @@ export function checkRemoval(spectrum: Spectrum, options: RemovalOptions): void 
   }
   checkList(slantDepthUncertainties, 0, "slantDepthUncertainties", NAME);
   slantDepthUncertainties.forEach((cause, i) => {
-    const range = "a function of wavelength in nm";
-    if (typeof cause !== "function")
-      refuse(`${cause}`, range, "", `slantDepthUncertainties[${i}]`, NAME);
+    checkFunction(cause, "wavelength in nm", `slantDepthUncertainties[${i}]`, NAME);
   });
   checkNumber(leastTransmittance, 1e-6, 1, "fraction", "leastTransmittance", NAME);
 }

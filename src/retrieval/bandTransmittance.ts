@@ -1,5 +1,6 @@
 /** What a channel sees of its own light through the air. */
 import { checkPositive } from "./_checkPositive.js";
+import { checkFunction } from "../_check.js";
 import { exp } from "../_numeric.js";
 import { checkCover, checkSpectrum } from "../spectrum/_checkSpectrum.js";
 import { segmentFrom, valueInSegment } from "../spectrum/_valueAt.js";
@@ -36,9 +37,7 @@ export function bandTransmittance(
 ): Fraction {
   checkSpectrum(passband, "passband", NAME);
   checkSpectrum(source, "source", NAME);
-  if (typeof slantDepth !== "function") {
-    throw new TypeError(`${NAME}: slantDepth must be a function of wavelength in nm`);
-  }
+  checkFunction(slantDepth, "wavelength in nm", "slantDepth", NAME);
   const nodes = nodesOf(passband, source);
   checkCover(source, nodes[0]!, nodes[nodes.length - 1]!, "source", NAME);
   let [through, outside] = [0, 0];

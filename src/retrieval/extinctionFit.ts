@@ -92,7 +92,7 @@ export function extinctionFit(
   observations: readonly StarObservation[],
   terms: ExtinctionTerms,
 ): readonly BandExtinction[] {
-  checkRecord(terms, "terms", NAME);
+  checkTerms(terms);
   const bands = checkStars(observations, 2 + Number(terms.secondOrder) + Number(terms.colourTerm));
   return Array.from(bands, ([band, places]) => {
     const stars = places.map((place) => observations[place]!);
@@ -109,4 +109,11 @@ export function extinctionFit(
       `${NAME}: observations in ${band} cannot tell the terms apart: add stars of other colours or drop a term`,
     );
   });
+}
+
+function checkTerms(terms: ExtinctionTerms): void {
+  checkRecord(terms, "terms", NAME);
+  for (const term of ["secondOrder", "colourTerm"] as const)
+    if (typeof terms[term] !== "boolean")
+      throw new TypeError(`${NAME}: terms.${term} must be true or false`);
 }

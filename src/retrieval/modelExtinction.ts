@@ -1,6 +1,7 @@
 /** The extinction coefficients that a model of the air predicts for a passband. */
-import { checkList, checkNumber, checkRecord } from "../_check.js";
+import { checkFunction, checkList, checkNumber, checkRecord } from "../_check.js";
 import { log } from "../_numeric.js";
+import { checkSpectrum } from "../spectrum/_checkSpectrum.js";
 import type { Passband, Spectrum } from "../spectrum/spectrum.js";
 import type { Dimensionless, QuantityOfWavelength } from "../units.js";
 import { bandTransmittance } from "./bandTransmittance.js";
@@ -90,6 +91,8 @@ export function modelExtinction(model: ExtinctionModel): PredictedExtinction {
 
 function checkModel(model: ExtinctionModel): void {
   checkRecord(model, "model", NAME);
+  checkSpectrum(model.passband, "passband", NAME);
+  checkFunction(model.opticalDepth, "wavelength in nm", "opticalDepth", NAME);
   checkList(model.stars, 2, "stars", NAME);
   model.stars.forEach((star, i) => {
     checkRecord(star, `stars[${i}]`, NAME);

@@ -67,7 +67,7 @@ export function removeAtmosphere(
   beam: Beam,
   options: RemovalOptions,
 ): OutsideSpectrum {
-  checkRemoval(spectrum, options);
+  checkRemoval(spectrum, beam, options);
   const { wavelengthsNm } = spectrum;
   const transmittances = beamTransmittances(wavelengthsNm, beam);
   const clear = transmittances.map((t) => (t >= options.leastTransmittance ? t : Number.NaN));

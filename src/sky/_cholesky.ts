@@ -1,8 +1,9 @@
 /** Symmetric positive definite systems, row by row in flat arrays. */
-import { zeros } from "./_zeros.js";
+import type { Zeros } from "./_zeros.js";
 
 /** Lower Cholesky factor of `matrix` plus `diagonal`; its diagonal holds reciprocals. */
 export function choleskyFactor(
+  zeros: Zeros,
   matrix: Float64Array,
   diagonal: Float64Array,
   size: number,

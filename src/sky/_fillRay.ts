@@ -4,7 +4,6 @@ import type { Nodes } from "./_nodes.js";
 import type { Ray, ShellSky } from "./_rays.js";
 import { coefficientAt } from "./_shellAir.js";
 import { outward } from "./_slantDepth.js";
-import { zeros } from "./_zeros.js";
 
 /** A stretch of a ray; its points may crowd towards its start. */
 export interface Stretch {
@@ -25,9 +24,9 @@ export function fillRay(
   const radius = sky.air.groundM + heightM;
   const depthTo = depthAlong(sky, heightM, cosine);
   const count = nodes.cosines.length;
-  const paths = zeros(parts.length * count);
-  const heights = zeros(parts.length * count);
-  const weights = zeros(parts.length * count);
+  const paths = new Float64Array(parts.length * count);
+  const heights = new Float64Array(parts.length * count);
+  const weights = new Float64Array(parts.length * count);
   let k = 0;
   for (const { start, length, crowded } of parts) {
     for (let q = 0; q < count; q++, k++) {

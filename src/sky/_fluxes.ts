@@ -2,7 +2,7 @@
 import { evenGlow, fieldFlux } from "./_ground.js";
 import type { Stack, StackField } from "./_stack.js";
 import { bottomField, topField } from "./_stackEnds.js";
-import { zeros } from "./_zeros.js";
+import type { Zeros } from "./_zeros.js";
 
 /** Diffuse fluxes at the boundaries, from the top down. */
 export interface DiffuseFluxes {
@@ -11,10 +11,10 @@ export interface DiffuseFluxes {
 }
 
 /** Diffuse fluxes of `field`, in units of its sources. */
-export function diffuseFluxes(stack: Stack, field: StackField): DiffuseFluxes {
+export function diffuseFluxes(zeros: Zeros, stack: Stack, field: StackField): DiffuseFluxes {
   const count = stack.layers.length;
   const { secants } = stack.kernel;
-  const glow = evenGlow(stack.kernel);
+  const glow = evenGlow(zeros, stack.kernel);
   const down = zeros(count + 1);
   const up = zeros(count + 1);
   for (let b = 1; b < count; b++) down[b] = fieldFlux(field.down[b]!, glow, secants);
@@ -22,8 +22,8 @@ export function diffuseFluxes(stack: Stack, field: StackField): DiffuseFluxes {
   if (count === 0) {
     up[0] = fieldFlux(field.up[0]!, glow, secants);
   } else {
-    up[0] = fieldFlux(topField(stack, field), glow, secants);
-    down[count] = fieldFlux(bottomField(stack, field), glow, secants);
+    up[0] = fieldFlux(topField(zeros, stack, field), glow, secants);
+    down[count] = fieldFlux(bottomField(zeros, stack, field), glow, secants);
   }
   return { down, up };
 }

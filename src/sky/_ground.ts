@@ -1,14 +1,14 @@
 /** The ground's light and the flux through a level, in the scaled fields of mode 0. */
 import type { ModeKernel } from "./_kernel.js";
 import { plus } from "./_matrix.js";
-import { zeros } from "./_zeros.js";
+import type { Zeros } from "./_zeros.js";
 
 /** Field of a surface of radiance 1, the same in all directions and unpolarised. */
-export function evenGlow(kernel: ModeKernel): Float64Array {
+export function evenGlow(zeros: Zeros, kernel: ModeKernel): Float64Array {
   const [c11, c21, c22] = kernel.mixing;
   const u1 = 0.5 / c11;
   const u2 = (0.5 - c21 * u1) / c22;
-  return plus(plus(zeros(kernel.size), u1, kernel.first), u2, kernel.second);
+  return plus(zeros, plus(zeros, zeros(kernel.size), u1, kernel.first), u2, kernel.second);
 }
 
 /** Flux through a horizontal unit area of a field travelling up or down; `glow` is the field of `evenGlow`. */

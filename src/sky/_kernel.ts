@@ -7,7 +7,7 @@
  * I_l = c² e cos(2 az), I_r = -e cos(2 az), U = -2 c e sin(2 az). Depolarisation mixes A and B and weakens d and e.
  */
 import type { Nodes } from "./_nodes.js";
-import { zeros } from "./_zeros.js";
+import type { Zeros } from "./_zeros.js";
 
 /** One azimuth mode on the nodes, before any layer is known. */
 export interface ModeKernel {
@@ -35,7 +35,7 @@ export function dipoleShare(depolarisation: number): number {
 }
 
 /** Mode 0: kernel 3/4 Cᵀ [[1 + c⁴, c² s²], [c² s², s⁴]] C, factored at each node. */
-export function meanKernel(nodes: Nodes, dipole: number): ModeKernel {
+export function meanKernel(zeros: Zeros, nodes: Nodes, dipole: number): ModeKernel {
   const count = nodes.cosines.length;
   const isotropic = (1 - dipole) / 3;
   const c11 = Math.sqrt(0.5 * dipole + isotropic);
@@ -72,7 +72,7 @@ export function meanKernel(nodes: Nodes, dipole: number): ModeKernel {
 }
 
 /** Modes 1 and 2: kernels 3/8 s² (1 + 2 c²) and 3/16 (1 + c²)², times the dipole share. */
-export function wavyKernel(order: 1 | 2, nodes: Nodes, dipole: number): ModeKernel {
+export function wavyKernel(zeros: Zeros, order: 1 | 2, nodes: Nodes, dipole: number): ModeKernel {
   const size = nodes.cosines.length;
   const first = zeros(size);
   const secants = zeros(size);

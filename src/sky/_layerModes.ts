@@ -3,7 +3,7 @@ import { expm1 } from "../_numeric.js";
 import { choleskyFactor } from "./_cholesky.js";
 import { decayModes } from "./_decayModes.js";
 import type { ModeKernel } from "./_kernel.js";
-import { zeros } from "./_zeros.js";
+import type { Zeros } from "./_zeros.js";
 
 /** Single-scattering albedos up to this count as none: what they scatter is below every stated accuracy. */
 const DARK = 1e-10;
@@ -33,10 +33,15 @@ export interface LayerModes {
 }
 
 /** Solves a layer of optical depth `depth` > 0 and single-scattering albedo `albedo`. */
-export function layerModes(kernel: ModeKernel, depth: number, albedo: number): LayerModes {
+export function layerModes(
+  zeros: Zeros,
+  kernel: ModeKernel,
+  depth: number,
+  albedo: number,
+): LayerModes {
   const { size, secants } = kernel;
   const scattering = albedo > DARK ? albedo : 0;
-  const { values, vectors, first, second } = decayModes(kernel, scattering);
+  const { values, vectors, first, second } = decayModes(zeros, kernel, scattering);
   const even = zeros(size);
   const odd = zeros(size);
   const squares = zeros(size);
@@ -47,7 +52,7 @@ export function layerModes(kernel: ModeKernel, depth: number, albedo: number): L
     even[m] = (k * lost) / (2 - lost);
     odd[m] = k * depth > 1e-9 ? (k * (2 - lost)) / lost : 2 / depth;
   }
-  const overlap = secantMatrix(vectors, secants);
+  const overlap = secantMatrix(zeros, vectors, secants);
   return {
     depth,
     squares,
@@ -57,13 +62,13 @@ export function layerModes(kernel: ModeKernel, depth: number, albedo: number): L
     second,
     albedo: scattering,
     vectors,
-    evenFactor: choleskyFactor(overlap, even, size),
-    oddFactor: choleskyFactor(overlap, odd, size),
+    evenFactor: choleskyFactor(zeros, overlap, even, size),
+    oddFactor: choleskyFactor(zeros, overlap, odd, size),
   };
 }
 
 /** Eigenvectors' overlaps weighted by 1 / cosine; the lower triangle is filled. */
-function secantMatrix(vectors: Float64Array, secants: Float64Array): Float64Array {
+function secantMatrix(zeros: Zeros, vectors: Float64Array, secants: Float64Array): Float64Array {
   const size = secants.length;
   const matrix = zeros(size * size);
   const weighted = zeros(size);

@@ -3,8 +3,9 @@ import { plus } from "./_matrix.js";
 import { exp } from "../_numeric.js";
 import type { LayerModes } from "./_layerModes.js";
 import { addBeam, type BeamSource, sunSource } from "./_sunBeam.js";
-import { type Amplitudes, darkSources, type Stack, type StackField, solveStack } from "./_stack.js";
-import { zeros } from "./_zeros.js";
+import { type Amplitudes, darkSources, type Stack, type StackField } from "./_stack.js";
+import { solveStack } from "./_solveStack.js";
+import type { Zeros } from "./_zeros.js";
 
 /** Source of one layer: its eigenmodes' amplitudes, albedo included, and what follows the beam. */
 export interface LitLayer extends Amplitudes {
@@ -20,8 +21,13 @@ export interface LitStack {
 }
 
 /** Lights a stack, over a black ground, with a sunbeam of flux π carried by `secants`, each with an equal share. */
-export function litStack(stack: Stack, secants: readonly number[], cosine: number): LitStack {
-  const sources = darkSources(stack);
+export function litStack(
+  zeros: Zeros,
+  stack: Stack,
+  secants: readonly number[],
+  cosine: number,
+): LitStack {
+  const sources = darkSources(zeros, stack);
   const share = 1 / secants.length;
   const beams = stack.layers.map((): BeamSource[] => []);
   const [first, second] = sunSource(stack, cosine);
@@ -34,16 +40,23 @@ export function litStack(stack: Stack, secants: readonly number[], cosine: numbe
       addBeam(layer, sources[l]!, beams[l]!.at(-1)!);
     }
   }
-  const field = solveStack(stack, sources, zeros(stack.kernel.size));
-  const layers = stack.layers.map((layer, l) => litLayer(layer, field.amplitudes[l]!, beams[l]!));
+  const field = solveStack(zeros, stack, sources, zeros(stack.kernel.size));
+  const layers = stack.layers.map((layer, l) =>
+    litLayer(zeros, layer, field.amplitudes[l]!, beams[l]!),
+  );
   return { stack, layers, field };
 }
 
 /** Sorts a solved layer by form: what the particular solution adds goes to the beams and is taken from the eigenmodes. */
-function litLayer(layer: LayerModes, solved: Amplitudes, beams: readonly BeamSource[]): LitLayer {
+function litLayer(
+  zeros: Zeros,
+  layer: LayerModes,
+  solved: Amplitudes,
+  beams: readonly BeamSource[],
+): LitLayer {
   const { albedo } = layer;
-  const even = plus(zeros(solved.even.length), albedo, solved.even);
-  const odd = plus(zeros(solved.odd.length), albedo, solved.odd);
+  const even = plus(zeros, zeros(solved.even.length), albedo, solved.even);
+  const odd = plus(zeros, zeros(solved.odd.length), albedo, solved.odd);
   const all = beams.map((beam): BeamSource => {
     const { secant } = beam;
     const left = exp(-secant * layer.depth);
@@ -59,19 +72,4 @@ function litLayer(layer: LayerModes, solved: Amplitudes, beams: readonly BeamSou
     return { secant, first, second };
   });
   return { even, odd, beams: all };
-}
-
-/** The same mode with the light of a ground of radiance `radiance` added. */
-export function addGlow(lit: LitStack, glow: StackField, radiance: number): LitStack {
-  if (radiance === 0) return lit;
-  const layers = lit.layers.map((layer, l) => {
-    const scale = radiance * lit.stack.layers[l]!.albedo;
-    const { even, odd } = glow.amplitudes[l]!;
-    return {
-      even: plus(layer.even, scale, even),
-      odd: plus(layer.odd, scale, odd),
-      beams: layer.beams,
-    };
-  });
-  return { ...lit, layers };
 }

@@ -1,15 +1,20 @@
 /** Square matrices in flat arrays, row by row. */
-import { copyOf, zeros } from "./_zeros.js";
+import { copyOf, type Zeros } from "./_zeros.js";
 
 /** The unit matrix. */
-export function identity(size: number): Float64Array {
+export function identity(zeros: Zeros, size: number): Float64Array {
   const matrix = zeros(size * size);
   for (let i = 0; i < size; i++) matrix[i * size + i] = 1;
   return matrix;
 }
 
 /** Product of two matrices. */
-export function product(left: Float64Array, right: Float64Array, size: number): Float64Array {
+export function product(
+  zeros: Zeros,
+  left: Float64Array,
+  right: Float64Array,
+  size: number,
+): Float64Array {
   const result = zeros(size * size);
   for (let i = 0; i < size; i++) {
     for (let k = 0; k < size; k++) {
@@ -22,6 +27,7 @@ export function product(left: Float64Array, right: Float64Array, size: number): 
 
 /** Matrix times vector, added to `start` where one is given. */
 export function apply(
+  zeros: Zeros,
   matrix: Float64Array,
   vector: Float64Array,
   start?: Float64Array,
@@ -40,9 +46,9 @@ export function apply(
  * Inverse by elimination without exchange of rows: for matrices near the unit matrix (1 less a reflection of norm below 1).
  * Columns already eliminated are left as they are in `work`; those not yet reached are still zero in the result.
  */
-export function inverse(matrix: Float64Array, size: number): Float64Array {
-  const work = copyOf(matrix);
-  const result = identity(size);
+export function inverse(zeros: Zeros, matrix: Float64Array, size: number): Float64Array {
+  const work = copyOf(zeros, matrix);
+  const result = identity(zeros, size);
   for (let p = 0; p < size; p++) {
     const pivot = p * size;
     const scale = 1 / work[pivot + p]!;
@@ -60,8 +66,13 @@ export function inverse(matrix: Float64Array, size: number): Float64Array {
 }
 
 /** `left` plus `scale` times `right`, number by number. */
-export function plus(left: Float64Array, scale: number, right: Float64Array): Float64Array {
-  const result = copyOf(left);
+export function plus(
+  zeros: Zeros,
+  left: Float64Array,
+  scale: number,
+  right: Float64Array,
+): Float64Array {
+  const result = copyOf(zeros, left);
   for (let i = 0; i < result.length; i++) result[i]! += scale * right[i]!;
   return result;
 }

@@ -1,15 +1,16 @@
 /** How a layer answers light at its faces, from its eigenmodes. */
 import type { LayerModes } from "./_layerModes.js";
-import { copyOf, zeros } from "./_zeros.js";
+import { copyOf, type Zeros } from "./_zeros.js";
 
 /** A layer's reflection and transmission: the sum and difference of its answers to even and odd illumination. */
 export function responses(
+  zeros: Zeros,
   layer: LayerModes,
   secants: Float64Array,
 ): { reflection: Float64Array; transmission: Float64Array } {
   const size = secants.length;
-  const even = answer(layer.evenFactor, layer.vectors, secants);
-  const odd = answer(layer.oddFactor, layer.vectors, secants);
+  const even = answer(zeros, layer.evenFactor, layer.vectors, secants);
+  const odd = answer(zeros, layer.oddFactor, layer.vectors, secants);
   const reflection = zeros(size * size);
   const transmission = zeros(size * size);
   for (let i = 0; i < size * size; i++) {
@@ -21,9 +22,14 @@ export function responses(
 }
 
 /** Secants times Z (factor factorᵀ)⁻¹ Zᵀ, Z the eigenvectors as columns. */
-function answer(factor: Float64Array, vectors: Float64Array, secants: Float64Array): Float64Array {
+function answer(
+  zeros: Zeros,
+  factor: Float64Array,
+  vectors: Float64Array,
+  secants: Float64Array,
+): Float64Array {
   const size = secants.length;
-  const half = copyOf(vectors); // factor⁻¹ Zᵀ
+  const half = copyOf(zeros, vectors); // factor⁻¹ Zᵀ
   for (let m = 0; m < size; m++) {
     for (let k = 0; k < m; k++) {
       const part = factor[m * size + k]!;

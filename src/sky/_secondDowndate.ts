@@ -2,10 +2,11 @@
 import type { DecayModes } from "./_decayModes.js";
 import type { ModeKernel } from "./_kernel.js";
 import { type Eigensystem, rankOneDowndate } from "./_secular.js";
-import { zeros } from "./_zeros.js";
+import type { Zeros } from "./_zeros.js";
 
 /** The second outer product of mode 0, in the basis the first one left: its vectors, and the bare second components between them. */
 export function secondDowndate(
+  zeros: Zeros,
   kernel: ModeKernel,
   scale: number,
   nodePoles: Float64Array,
@@ -25,11 +26,11 @@ export function secondDowndate(
     vector[2 * i] = scale * sum;
     vector[2 * i + 1] = scale * kernel.second[count + i]! * secants[i]!;
   }
-  return turnBack(before, rankOneDowndate(poles, vector), scale);
+  return turnBack(zeros, before, rankOneDowndate(zeros, poles, vector), scale);
 }
 
 /** Eigenvectors found in the basis of the first step, back in that of the nodes. */
-function turnBack(before: DecayModes, after: Eigensystem, scale: number): DecayModes {
+function turnBack(zeros: Zeros, before: DecayModes, after: Eigensystem, scale: number): DecayModes {
   const { values, vectors: turned, couplings } = after;
   const size = values.length;
   const count = size / 2;

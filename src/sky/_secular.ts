@@ -1,6 +1,6 @@
 /** Eigenvalues and eigenvectors of a diagonal matrix less one outer product, in a number of steps that grows as the square of its size. */
 import { reducedSecular, secularRoot } from "./_secularRoot.js";
-import { zeros } from "./_zeros.js";
+import type { Zeros } from "./_zeros.js";
 
 /** What `rankOneDowndate` finds. */
 export interface Eigensystem {
@@ -17,7 +17,11 @@ export interface Eigensystem {
  * Each eigenvalue lies between two poles and is found there as its distance from the nearer one; the vector is then
  * recomputed from the eigenvalues so that the eigenvectors come out orthogonal (Gu & Eisenstat 1994, SIAM J. Matrix Anal. Appl. 15, 1266).
  */
-export function rankOneDowndate(poles: Float64Array, vector: Float64Array): Eigensystem {
+export function rankOneDowndate(
+  zeros: Zeros,
+  poles: Float64Array,
+  vector: Float64Array,
+): Eigensystem {
   const size = poles.length;
   const values = zeros(size);
   const gaps = zeros(size * size); // pole j less value m, at m * size + j
@@ -29,7 +33,7 @@ export function rankOneDowndate(poles: Float64Array, vector: Float64Array): Eige
     values[m] = poles[origin]! + shift;
     for (let j = 0; j < size; j++) gaps[m * size + j] = poles[j]! - poles[origin]! - shift;
   }
-  const exact = consistentVector(poles, gaps);
+  const exact = consistentVector(zeros, poles, gaps);
   const couplings = zeros(size);
   for (let m = 0; m < size; m++) {
     let square = 0;
@@ -49,7 +53,7 @@ export function rankOneDowndate(poles: Float64Array, vector: Float64Array): Eige
 }
 
 /** The vector, without signs, of which the computed eigenvalues are exact. */
-function consistentVector(poles: Float64Array, gaps: Float64Array): Float64Array {
+function consistentVector(zeros: Zeros, poles: Float64Array, gaps: Float64Array): Float64Array {
   const size = poles.length;
   const exact = zeros(size);
   for (let j = 0; j < size; j++) {

@@ -33,9 +33,7 @@ export function onceScattered(
 /** Distance along the line of sight at which it leaves the Earth's shadow, a cylinder; 0 while the sun is up. */
 function shadowEnd(groundM: number, sun: number, view: number, between: number): number {
   if (sun >= 0) return 0;
-  const square = 1 - between * between;
   const half = view - sun * between;
-  const root = Math.sqrt(half * half + square * sun * sun);
-  // longer root of square s² + 2 half s = sun², in Earth radii
-  return half > 0 ? (groundM * sun * sun) / (half + root) : (groundM * (root - half)) / square;
+  const root = Math.sqrt(half * half + (1 - between * between) * sun * sun);
+  return (groundM * sun * sun) / (half + root); // root of (1 - between²) s² + 2 half s = sun², in Earth radii
 }

@@ -3,8 +3,7 @@ import { type Join, joinLayers } from "./_adding.js";
 import type { ModeKernel } from "./_kernel.js";
 import type { LayerModes } from "./_layerModes.js";
 import { layerModes } from "./_layerModes.js";
-import { solveLayer, sweep } from "./_sweep.js";
-import { zeros } from "./_zeros.js";
+import type { Zeros } from "./_zeros.js";
 
 /** One azimuth mode of a prepared stack. */
 export interface Stack {
@@ -31,60 +30,21 @@ export interface StackField {
 
 /** Solves every layer and joins them. */
 export function prepareStack(
+  zeros: Zeros,
   kernel: ModeKernel,
   depths: readonly number[],
   albedos: readonly number[],
 ): Stack {
-  const layers = depths.map((depth, l) => layerModes(kernel, depth, albedos[l]!));
-  return { kernel, layers, joins: layers.length > 1 ? joinLayers(layers, kernel.secants) : [] };
-}
-
-/**
- * Finishes a solution. `sources` holds for each layer the right-hand sides its own sources make (overwritten);
- * `fromBelow` is the scaled field that enters at the bottom.
- */
-export function solveStack(
-  stack: Stack,
-  sources: readonly Amplitudes[],
-  fromBelow: Float64Array,
-): StackField {
-  const { layers, joins, kernel } = stack;
-  const last = layers.length - 1;
-  const down: Float64Array[] = [zeros(kernel.size)];
-  const up: Float64Array[] = [];
-  if (joins.length === 0) {
-    up.push(fromBelow);
-  } else {
-    sweep(stack, sources, fromBelow, down, up);
-  }
-  for (let l = 0; l <= last; l++) addIncoming(layers[l]!, sources[l]!, down[l]!, up[l]!);
-  for (let l = 0; l <= last; l++) solveLayer(layers[l]!, sources[l]!);
-  return { amplitudes: sources, down, up };
-}
-
-/** Adds to a layer's right-hand sides the fields that enter it: their sum to the even, their difference to the odd. */
-function addIncoming(
-  layer: LayerModes,
-  source: Amplitudes,
-  top: Float64Array,
-  bottom: Float64Array,
-): void {
-  const size = top.length;
-  for (let m = 0; m < size; m++) {
-    let sum = 0;
-    let difference = 0;
-    for (let j = 0; j < size; j++) {
-      const part = layer.vectors[m * size + j]!;
-      sum += part * (top[j]! + bottom[j]!);
-      difference += part * (top[j]! - bottom[j]!);
-    }
-    source.even[m]! += sum;
-    source.odd[m]! += difference;
-  }
+  const layers = depths.map((depth, l) => layerModes(zeros, kernel, depth, albedos[l]!));
+  return {
+    kernel,
+    layers,
+    joins: layers.length > 1 ? joinLayers(zeros, layers, kernel.secants) : [],
+  };
 }
 
 /** Right-hand sides of layers without sources. */
-export function darkSources(stack: Stack): Amplitudes[] {
+export function darkSources(zeros: Zeros, stack: Stack): Amplitudes[] {
   const { size } = stack.kernel;
   return stack.layers.map(() => ({ even: zeros(size), odd: zeros(size) }));
 }

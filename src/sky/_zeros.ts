@@ -3,27 +3,34 @@
  * longer than the sums themselves. For what stays inside the library; a caller's arrays have buffers of their own.
  */
 
-/** Numbers in a block (64 kB), and the most that are cut from one. */
-const BLOCK = 8192;
+/** Makes an array of zeros. */
+export type Zeros = (count: number) => Float64Array;
+
+/** Numbers in the first block (8 kB), in the largest (64 kB), and the most that are cut from one. */
+const FIRST = 1024;
+const LARGEST = 8192;
 const MOST = 1024;
 
-let block: ArrayBuffer | undefined;
-let used = 0;
-
-/** An array of zeros. */
-export function zeros(count: number): Float64Array {
-  if (count > MOST) return new Float64Array(count);
-  if (block === undefined || used + count > BLOCK) {
-    block = new ArrayBuffer(BLOCK * Float64Array.BYTES_PER_ELEMENT);
-    used = 0;
-  }
-  const start = used * Float64Array.BYTES_PER_ELEMENT;
-  used += count;
-  return new Float64Array(block, start, count);
+/** A maker of arrays that keeps blocks of its own, each twice the last. */
+export function zerosFromBlocks(): Zeros {
+  let size = FIRST / 2;
+  let used = size;
+  let block: ArrayBuffer;
+  return (count) => {
+    if (count > MOST) return new Float64Array(count);
+    if (used + count > size) {
+      size = Math.min(2 * size, LARGEST);
+      block = new ArrayBuffer(size * Float64Array.BYTES_PER_ELEMENT);
+      used = 0;
+    }
+    const start = used * Float64Array.BYTES_PER_ELEMENT;
+    used += count;
+    return new Float64Array(block, start, count);
+  };
 }
 
 /** A copy to be overwritten. */
-export function copyOf(values: Float64Array): Float64Array {
+export function copyOf(zeros: Zeros, values: Float64Array): Float64Array {
   const copy = zeros(values.length);
   copy.set(values);
   return copy;

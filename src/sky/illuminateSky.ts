@@ -2,11 +2,13 @@
 import { checkPrepared } from "../_check.js";
 import { cos, exp } from "../_numeric.js";
 import { type Degrees, RADIANS_PER_DEGREE } from "../units.js";
+import { addGlow } from "./_addGlow.js";
 import { safeSecants } from "./_beam.js";
 import { checkZenith } from "./_checkZenith.js";
 import { diffuseFluxes } from "./_fluxes.js";
-import { type LitStack, addGlow, litStack } from "./_litStack.js";
+import { type LitStack, litStack } from "./_litStack.js";
 import type { PreparedSky } from "./prepareSky.js";
+import { zerosFromBlocks } from "./_zeros.js";
 
 /** Sky lit by a sunbeam of flux π through a unit area square to it; make it with `illuminateSky`. */
 export interface LitSky {
@@ -52,8 +54,9 @@ export function illuminateSky(sky: PreparedSky, sunZenithDeg: Degrees): LitSky {
   const cosine = cos(sunZenithDeg * RADIANS_PER_DEGREE);
   const beams = safeSecants(sky.stacks, 1 / cosine);
   const [mean, first, second] = sky.stacks;
-  const lit = litStack(mean, beams, cosine);
-  const fluxes = diffuseFluxes(mean, lit.field);
+  const zeros = zerosFromBlocks();
+  const lit = litStack(zeros, mean, beams, cosine);
+  const fluxes = diffuseFluxes(zeros, mean, lit.field);
   const depths = sky.boundaryDepths;
   const directFluxes = depths.map((depth) => Math.PI * cosine * exp(-depth / cosine));
   const onGround = directFluxes[depths.length - 1]! + fluxes.down[mean.layers.length]!;
@@ -73,9 +76,9 @@ export function illuminateSky(sky: PreparedSky, sunZenithDeg: Degrees): LitSky {
     diffuseFluxes: pick(fluxes.down, sky.glowFluxes.down),
     upwardFluxes: pick(fluxes.up, sky.glowFluxes.up),
     modes: [
-      addGlow(lit, sky.glow, groundRadiance),
-      litStack(first, beams, cosine),
-      litStack(second, beams, cosine),
+      addGlow(zeros, lit, sky.glow, groundRadiance),
+      litStack(zeros, first, beams, cosine),
+      litStack(zeros, second, beams, cosine),
     ],
   };
 }

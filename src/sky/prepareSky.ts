@@ -3,9 +3,11 @@ import type { Dimensionless, Fraction } from "../units.js";
 import { checkSky } from "./_checkSky.js";
 import { type DiffuseFluxes, diffuseFluxes } from "./_fluxes.js";
 import { evenGlow } from "./_ground.js";
-import { dipoleShare, meanKernel, wavyKernel } from "./_kernel.js";
+import { dipoleShare, type ModeKernel, meanKernel, wavyKernel } from "./_kernel.js";
 import { halfRangeNodes } from "./_nodes.js";
-import { darkSources, prepareStack, type Stack, type StackField, solveStack } from "./_stack.js";
+import { darkSources, prepareStack, type Stack, type StackField } from "./_stack.js";
+import { solveStack } from "./_solveStack.js";
+import { zerosFromBlocks } from "./_zeros.js";
 
 /** One homogeneous layer of the sky at one wavelength. */
 export interface SkyLayer {
@@ -79,6 +81,36 @@ const DEFAULT_STREAMS = 32;
 export function prepareSky(input: SkyInput): PreparedSky {
   checkSky(input);
   const { layers, depolarisation, groundAlbedo, streams = DEFAULT_STREAMS } = input;
+  const { depths, albedos, solvedBoundaries, boundaryDepths } = solvable(layers);
+  const zeros = zerosFromBlocks();
+  const nodes = halfRangeNodes(streams / 2);
+  const dipole = dipoleShare(depolarisation);
+  const stackOf = (kernel: ModeKernel): Stack => prepareStack(zeros, kernel, depths, albedos);
+  const mean = stackOf(meanKernel(zeros, nodes, dipole));
+  const glow = solveStack(zeros, mean, darkSources(zeros, mean), evenGlow(zeros, mean.kernel));
+  const glowFluxes = diffuseFluxes(zeros, mean, glow);
+  return {
+    boundaryDepths,
+    groundAlbedo,
+    sphericalAlbedo: glowFluxes.down[depths.length]! / Math.PI,
+    solvedBoundaries,
+    stacks: [
+      mean,
+      stackOf(wavyKernel(zeros, 1, nodes, dipole)),
+      stackOf(wavyKernel(zeros, 2, nodes, dipole)),
+    ],
+    glow,
+    glowFluxes,
+  };
+}
+
+/** The layers that are there: their depths and albedos, and which of their boundaries stands for each boundary given. */
+function solvable(layers: readonly SkyLayer[]): {
+  depths: number[];
+  albedos: number[];
+  solvedBoundaries: number[];
+  boundaryDepths: Float64Array;
+} {
   const depths: number[] = [];
   const albedos: number[] = [];
   const solvedBoundaries = [0];
@@ -92,22 +124,5 @@ export function prepareSky(input: SkyInput): PreparedSky {
     }
     solvedBoundaries.push(depths.length);
   }
-  const nodes = halfRangeNodes(streams / 2);
-  const dipole = dipoleShare(depolarisation);
-  const mean = prepareStack(meanKernel(nodes, dipole), depths, albedos);
-  const glow = solveStack(mean, darkSources(mean), evenGlow(mean.kernel));
-  const glowFluxes = diffuseFluxes(mean, glow);
-  return {
-    boundaryDepths,
-    groundAlbedo,
-    sphericalAlbedo: glowFluxes.down[depths.length]! / Math.PI,
-    solvedBoundaries,
-    stacks: [
-      mean,
-      prepareStack(wavyKernel(1, nodes, dipole), depths, albedos),
-      prepareStack(wavyKernel(2, nodes, dipole), depths, albedos),
-    ],
-    glow,
-    glowFluxes,
-  };
+  return { depths, albedos, solvedBoundaries, boundaryDepths };
 }

@@ -1,6 +1,7 @@
 /** Radiance of the clear sky in one direction. */
-import { checkNumber } from "../_check.js";
+import { checkNumber, checkPrepared } from "../_check.js";
 import type { SpectralIrradiance, SpectralRadiance } from "../units.js";
+import { checkDirection } from "./_checkDirection.js";
 import type { LitSky } from "./illuminateSky.js";
 import { type SkyDirection, skyStokes } from "./skyStokes.js";
 
@@ -29,6 +30,8 @@ export function skyRadiance(
   direction: SkyDirection,
   irradiance: SpectralIrradiance,
 ): SpectralRadiance {
+  checkPrepared(lit?.groundRadiance, "illuminateSky", "lit", "skyRadiance");
+  checkDirection(direction, "skyRadiance");
   checkNumber(irradiance, 0, 1e6, "W m⁻² nm⁻¹", "irradiance", "skyRadiance");
   return (skyStokes(lit, direction)[0] * irradiance) / Math.PI;
 }

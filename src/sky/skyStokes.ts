@@ -5,7 +5,6 @@ import { type Degrees, RADIANS_PER_DEGREE } from "../units.js";
 import { AMPLITUDES, amplitudesToStokes, sightAmplitudes } from "./_amplitudes.js";
 import { checkDirection } from "./_checkDirection.js";
 import type { LitSky } from "./illuminateSky.js";
-import { zeros } from "./_zeros.js";
 
 /** Where light is met that crosses the sky: on the ground looking up, or above the air, leaving upward. */
 export type SkyLevel = "ground" | "top";
@@ -66,7 +65,7 @@ export function skyStokes(lit: LitSky, direction: SkyDirection): Stokes {
   const cosine = cos(direction.viewZenithDeg * RADIANS_PER_DEGREE);
   const azimuth = direction.relativeAzimuthDeg * RADIANS_PER_DEGREE;
   const upward = direction.at === "top";
-  const amplitudes = zeros(AMPLITUDES);
+  const amplitudes = new Float64Array(AMPLITUDES);
   sightAmplitudes(lit, cosine, upward, amplitudes, 0);
   const stokes: Stokes = [0, 0, 0];
   const travel = upward ? cosine : -cosine;

@@ -7,7 +7,6 @@ import { checkAzimuth, checkLevel } from "./_checkDirection.js";
 import { checkZenith } from "./_checkZenith.js";
 import type { LitSky } from "./illuminateSky.js";
 import type { SkyLevel } from "./skyStokes.js";
-import { zeros } from "./_zeros.js";
 
 /** Lines of sight, direction i at index i of both lists. */
 export interface SkyDirections {
@@ -52,7 +51,7 @@ export function skyStokesMap(
   checkList(map, 3 * count, "out", "skyStokesMap");
   const upward = at === "top";
   const known = new Map<number, number>();
-  const amplitudes = zeros(AMPLITUDES * count);
+  const amplitudes = new Float64Array(AMPLITUDES * count);
   for (let i = 0; i < count; i++) {
     const zenith = viewZenithsDeg[i]!;
     const azimuth = relativeAzimuthsDeg[i]! * RADIANS_PER_DEGREE;

@@ -1,6 +1,6 @@
 /** Propagation of distributions by Monte Carlo. */
 import type { Budget } from "../budget.js";
-import { checkNumber, checkRecord, refuse } from "../_check.js";
+import { checkFunction, checkNumber, checkRecord, refuse } from "../_check.js";
 import type { Fraction } from "../units.js";
 import { prepareDraws } from "./_draws.js";
 import { checkInputs, type Correlation, type Model, type UncertainInput } from "./_inputs.js";
@@ -68,6 +68,7 @@ export function monteCarlo<Name extends string>(
   inputs: Readonly<Record<Name, UncertainInput>>,
   options: MonteCarloOptions<Name>,
 ): MonteCarloResult {
+  checkFunction(model, "the inputs' values", "model", "monteCarlo");
   const names = checkInputs(inputs, "monteCarlo");
   const { random, coverage, digits, mostTrials, correlations } = checkOptions(options);
   const draws = prepareDraws(names, inputs, correlations);

@@ -1,6 +1,6 @@
 /** The law of propagation of uncertainty. */
 import type { Budget } from "../budget.js";
-import { checkRecord, refuse } from "../_check.js";
+import { checkFunction, checkRecord, refuse } from "../_check.js";
 import { sqrt } from "../_numeric.js";
 import { combine, effectiveDegrees } from "./_combine.js";
 import {
@@ -60,6 +60,7 @@ export function propagate<Name extends string>(
   inputs: Readonly<Record<Name, UncertainInput>>,
   options: PropagateOptions<Name> = {},
 ): Propagation {
+  checkFunction(model, "the inputs' values", "model", "propagate");
   const names = checkInputs(inputs, "propagate");
   checkRecord(options, "options", "propagate");
   const { correlations = [], derivatives = {} as PropagateOptions<Name>["derivatives"] } = options;

@@ -93,3 +93,15 @@ describe("sunlight scattered once along a slanted sight", () => {
     },
   );
 });
+
+it("a sight away from the sun and lower than the sun is deep leaves the shadow above the air: no light", () => {
+  for (const [sunDeg, viewDeg] of [
+    [96, 89],
+    [93, 89.9],
+    [92, 88], // along the shadow
+  ] as const) {
+    const [sun, view] = [direction(sunDeg, 0), direction(viewDeg, 180)];
+    expect(isHidden(placeAt(view, 1.1e6), sun)).toBe(true); // the air ends before
+    expect(onceScattered(sky, sun[2], view[2], dot(sun, view), gaussNodes(8))).toBe(0);
+  }
+});

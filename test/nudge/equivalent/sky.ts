@@ -508,9 +508,9 @@ export const SKY: readonly Equivalent[] = [
   },
   {
     path: "src/sky/_singleSight.ts",
-    line: "return half > 0",
-    literals: ["0"],
-    why: "which of two forms of the same root",
+    line: "const root = ",
+    literals: ["1"],
+    why: "at the edge of the shadow no light comes through yet: a little earlier or later makes no difference",
   },
   {
     path: "src/sky/_sumOrders.ts",
@@ -610,8 +610,20 @@ export const SKY: readonly Equivalent[] = [
   },
   {
     path: "src/sky/_zeros.ts",
-    line: "const BLOCK",
+    line: "const FIRST",
+    literals: ["1024"],
+    why: "how many arrays share a block, not what they hold",
+  },
+  {
+    path: "src/sky/_zeros.ts",
+    line: "const LARGEST",
     literals: ["8192"],
+    why: "how many arrays share a block, not what they hold",
+  },
+  {
+    path: "src/sky/_zeros.ts",
+    line: "used = 0;",
+    literals: ["0"],
     why: "how many arrays share a block, not what they hold",
   },
   {
@@ -622,8 +634,8 @@ export const SKY: readonly Equivalent[] = [
   },
   {
     path: "src/sky/_zeros.ts",
-    line: "used = 0;",
-    literals: ["0"],
+    line: "size = ",
+    literals: ["2"],
     why: "how many arrays share a block, not what they hold",
   },
 ];
