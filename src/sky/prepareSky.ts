@@ -7,6 +7,7 @@ import { dipoleShare, type ModeKernel, meanKernel, wavyKernel } from "./_kernel.
 import { halfRangeNodes } from "./_nodes.js";
 import { darkSources, prepareStack, type Stack, type StackField } from "./_stack.js";
 import { solveStack } from "./_solveStack.js";
+import { solvable } from "./_solvable.js";
 import { zerosFromBlocks } from "./_zeros.js";
 
 /** One homogeneous layer of the sky at one wavelength. */
@@ -102,27 +103,4 @@ export function prepareSky(input: SkyInput): PreparedSky {
     glow,
     glowFluxes,
   };
-}
-
-/** The layers that are there: their depths and albedos, and which of their boundaries stands for each boundary given. */
-function solvable(layers: readonly SkyLayer[]): {
-  depths: number[];
-  albedos: number[];
-  solvedBoundaries: number[];
-  boundaryDepths: Float64Array;
-} {
-  const depths: number[] = [];
-  const albedos: number[] = [];
-  const solvedBoundaries = [0];
-  const boundaryDepths = new Float64Array(layers.length + 1);
-  for (const [l, { rayleighDepth, absorptionDepth }] of layers.entries()) {
-    const depth = rayleighDepth + absorptionDepth;
-    boundaryDepths[l + 1] = boundaryDepths[l]! + depth;
-    if (depth > 0) {
-      depths.push(depth);
-      albedos.push(rayleighDepth / depth);
-    }
-    solvedBoundaries.push(depths.length);
-  }
-  return { depths, albedos, solvedBoundaries, boundaryDepths };
 }
