@@ -1,7 +1,6 @@
 /** From a spectrum to what the eye's three receptors make of it. */
 import { PEAK_LUMINOUS_EFFICACY } from "../constants.js";
 import type { Spectrum } from "../spectrum/spectrum.js";
-import { checkObserver } from "./_checkObserver.js";
 import type { Observer } from "./observer.js";
 import type { Xyz } from "./triples.js";
 
@@ -31,10 +30,9 @@ import type { Xyz } from "./triples.js";
 export function spectrumToXyz(spectrum: Spectrum, observer: Observer): Xyz {
   const { wavelengthsNm, values } = spectrum ?? {};
   const last = wavelengthsNm?.length - 1;
-  if (!(values?.length === last + 1)) {
-    throw new TypeError("spectrumToXyz: spectrum must hold as many values as wavelengthsNm");
+  if (!(values?.length === last + 1 && observer?.stepNm > 0)) {
+    throw new TypeError("spectrumToXyz: needs a spectrum and an observer");
   }
-  checkObserver(observer, "spectrumToXyz");
   if (!(wavelengthsNm[0]! <= 400 && wavelengthsNm[last]! >= 700)) {
     throw new RangeError(
       `spectrumToXyz: spectrum must cover 400 to 700 nm, got ${wavelengthsNm[0]} to ${wavelengthsNm[last]}`,
