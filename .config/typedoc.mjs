@@ -36,6 +36,7 @@ export default {
   excludeInternal: true,
   excludePrivate: true,
   sort: ["source-order"],
+  groupOrder: ["Documents", "Modules", "Functions", "*"],
   includeVersion: true,
   disableSources: true,
   githubPages: false,
