@@ -13,13 +13,13 @@ const MOST = 1024;
 
 /** A maker of arrays that keeps blocks of its own, each twice the last. */
 export function zerosFromBlocks(): Zeros {
-  let size = FIRST / 2;
-  let used = size;
-  let block: ArrayBuffer;
+  let size = 0;
+  let used = 0;
+  let block = new ArrayBuffer(0);
   return (count) => {
     if (count > MOST) return new Float64Array(count);
     if (used + count > size) {
-      size = Math.min(2 * size, LARGEST);
+      size = Math.min(Math.max(2 * size, FIRST), LARGEST);
       block = new ArrayBuffer(size * Float64Array.BYTES_PER_ELEMENT);
       used = 0;
     }

@@ -634,8 +634,20 @@ export const SKY: readonly Equivalent[] = [
   },
   {
     path: "src/sky/_zeros.ts",
-    line: "size = ",
+    line: "size = Math.min",
     literals: ["2"],
+    why: "how many arrays share a block, not what they hold",
+  },
+  {
+    path: "src/sky/_zeros.ts",
+    line: "let size = 0",
+    literals: ["0"],
+    why: "how many arrays share a block, not what they hold",
+  },
+  {
+    path: "src/sky/_zeros.ts",
+    line: "let block = ",
+    literals: ["0"],
     why: "how many arrays share a block, not what they hold",
   },
 ];
