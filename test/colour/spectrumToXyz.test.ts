@@ -294,7 +294,18 @@ describe("edges", () => {
       RangeError,
       "got 81 and 2",
     );
-    for (const observer of [{}, { stepNm: 0 }, undefined])
+    const { startNm, stepNm, ...rows } = cie1931Observer;
+    const unfit = [
+      {},
+      undefined,
+      { ...rows, startNm },
+      { ...rows, stepNm },
+      { ...cie1931Observer, stepNm: 0 },
+      { ...cie1931Observer, y: undefined },
+      { ...cie1931Observer, z: rows.x.subarray(1) },
+      { startNm, stepNm, x: [1], y: [1], z: [1] },
+    ];
+    for (const observer of unfit)
       expectRefusal(() => spectraToXyz(one, grid, observer as never), TypeError, "observer");
     expectRefusal(
       () =>

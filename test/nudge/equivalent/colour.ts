@@ -33,10 +33,22 @@ export const COLOUR: readonly Equivalent[] = [
     why: "saves work: a share of zero would add zero",
   },
   {
-    path: "src/colour/spectrumToXyz.ts",
-    line: "observer?.stepNm > 0",
+    path: "src/colour/_checkObserver.ts",
+    line: "const rows = ",
     literals: ["0"],
-    why: "observers step by 1 or 5 nm; only a missing step is looked for",
+    why: "one row is too few as well",
+  },
+  {
+    path: "src/colour/_checkObserver.ts",
+    line: "const even = startNm > 0",
+    literals: ["0"],
+    why: "no observer starts at a thousandth of a nanometre, or goes by such steps",
+  },
+  {
+    path: "src/colour/_checkObserver.ts",
+    line: "rows > 1 &&",
+    literals: ["1"],
+    why: "compared with a whole number: anything between two of them does the same",
   },
   {
     path: "src/colour/spectrumToXyz.ts",
@@ -45,7 +57,7 @@ export const COLOUR: readonly Equivalent[] = [
     why: "a start off the grid leads to the slower way, which gives the same",
   },
   {
-    path: "src/colour/_checkObserver.ts",
+    path: "src/colour/spectrumToXyz.ts",
     line: "observer?.stepNm > 0",
     literals: ["0"],
     why: "observers step by 1 or 5 nm; only a missing step is looked for",

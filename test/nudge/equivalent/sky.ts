@@ -213,7 +213,7 @@ export const SKY: readonly Equivalent[] = [
     why: "both forms agree to rounding there",
   },
   {
-    path: "src/sky/_litStack.ts",
+    path: "src/sky/_addGlow.ts",
     line: "if (radiance === 0)",
     literals: ["0"],
     why: "saves work: nothing would be added",
