@@ -29,19 +29,6 @@ export function checkRecord(
   );
 }
 
-/** Throws unless `value` is a function, `of` what in words. */
-export function checkFunction(
-  value: unknown,
-  of: string,
-  argument: string,
-  functionName: string,
-): void {
-  if (typeof value === "function") return;
-  throw new TypeError(
-    `${functionName}: ${argument} must be a function of ${of}, got ${show(value)}`,
-  );
-}
-
 /** Throws unless `field`, a number every record made by `maker` carries, is a number: catches raw input given for a prepared record. */
 export function checkPrepared(
   field: unknown,

@@ -16,7 +16,7 @@ const UNITS: Readonly<Record<(typeof NAMES)[number], string>> = {
   co2Ppm: " ppm",
 };
 
-/** States worked out ahead of the first change: about a quarter of a second. */
+/** States worked out ahead of the first change. */
 const WARM_UP_ROUNDS = 40;
 
 const element = <T extends Element>(selector: string): T => document.querySelector<T>(selector)!;

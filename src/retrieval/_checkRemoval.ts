@@ -1,5 +1,6 @@
 /** The checks of `removeAtmosphere`. */
-import { checkFunction, checkList, checkNumber, checkPrepared, checkRecord } from "../_check.js";
+import { checkList, checkNumber, checkPrepared, checkRecord } from "../_check.js";
+import { checkFunction } from "../_checkFunction.js";
 import type { Beam } from "../beam/beam.js";
 import { checkSpectrum } from "../spectrum/_checkSpectrum.js";
 import type { Spectrum } from "../spectrum/spectrum.js";

@@ -1,6 +1,6 @@
 /** What a channel sees of its own light through the air. */
 import { checkPositive } from "./_checkPositive.js";
-import { checkFunction } from "../_check.js";
+import { checkFunction } from "../_checkFunction.js";
 import { exp } from "../_numeric.js";
 import { checkCover, checkSpectrum } from "../spectrum/_checkSpectrum.js";
 import { segmentFrom, valueInSegment } from "../spectrum/_valueAt.js";

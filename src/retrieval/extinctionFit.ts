@@ -1,5 +1,6 @@
 /** Extinction coefficients from a night of stellar photometry. */
 import { checkRecord } from "../_check.js";
+import { show } from "../_refuse.js";
 import { checkStars } from "./_checkStars.js";
 import { bandResult } from "./_bandResult.js";
 import { cleanedPlane } from "./_cleanedPlane.js";
@@ -115,5 +116,5 @@ function checkTerms(terms: ExtinctionTerms): void {
   checkRecord(terms, "terms", NAME);
   for (const term of ["secondOrder", "colourTerm"] as const)
     if (typeof terms[term] !== "boolean")
-      throw new TypeError(`${NAME}: terms.${term} must be true or false`);
+      throw new TypeError(`${NAME}: terms.${term} must be true or false, got ${show(terms[term])}`);
 }

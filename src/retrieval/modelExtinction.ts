@@ -1,5 +1,6 @@
 /** The extinction coefficients that a model of the air predicts for a passband. */
-import { checkFunction, checkList, checkNumber, checkRecord } from "../_check.js";
+import { checkList, checkNumber, checkRecord } from "../_check.js";
+import { checkFunction } from "../_checkFunction.js";
 import { log } from "../_numeric.js";
 import { checkSpectrum } from "../spectrum/_checkSpectrum.js";
 import type { Passband, Spectrum } from "../spectrum/spectrum.js";

@@ -1,6 +1,7 @@
 /** Propagation of distributions by Monte Carlo. */
 import type { Budget } from "../budget.js";
-import { checkFunction, checkNumber, checkRecord, refuse } from "../_check.js";
+import { checkNumber, checkRecord, refuse } from "../_check.js";
+import { checkFunction } from "../_checkFunction.js";
 import type { Fraction } from "../units.js";
 import { prepareDraws } from "./_draws.js";
 import { checkInputs, type Correlation, type Model, type UncertainInput } from "./_inputs.js";

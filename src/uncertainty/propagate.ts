@@ -1,6 +1,7 @@
 /** The law of propagation of uncertainty. */
 import type { Budget } from "../budget.js";
-import { checkFunction, checkRecord, refuse } from "../_check.js";
+import { checkRecord, refuse } from "../_check.js";
+import { checkFunction } from "../_checkFunction.js";
 import { sqrt } from "../_numeric.js";
 import { combine, effectiveDegrees } from "./_combine.js";
 import {
